@@ -1,0 +1,6 @@
+/** Most attitudes that one JSON call may carry. */
+export const ATTITUDES_PER_CALL = 10_000;
+/** Most bytes of one JSON body, after decompression. 10,000 matrices at full precision take about 2 MB. */
+export const JSON_BODY_BYTES = 8 * 1024 * 1024;
+/** Rows of one page of a list. */
+export const PAGE_SIZE = { default: 50, most: 200 } as const;

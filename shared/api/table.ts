@@ -1,0 +1,22 @@
+import { convertEndpoint } from './attitude.ts';
+import { getConventionEndpoint, listConventionsEndpoint } from './conventions.ts';
+import type { Endpoint } from './endpoint.ts';
+import { healthEndpoint } from './health.ts';
+import { listHistoryEndpoint } from './history.ts';
+import { issueKeyEndpoint, listKeysEndpoint, revokeKeyEndpoint } from './keys.ts';
+import { currentSessionEndpoint, signInEndpoint, signOutEndpoint } from './sessions.ts';
+
+/** Every operation of the API, in the order of the documentation. */
+export const ENDPOINTS: readonly Endpoint[] = [
+  convertEndpoint,
+  listConventionsEndpoint,
+  getConventionEndpoint,
+  listKeysEndpoint,
+  issueKeyEndpoint,
+  revokeKeyEndpoint,
+  listHistoryEndpoint,
+  signInEndpoint,
+  currentSessionEndpoint,
+  signOutEndpoint,
+  healthEndpoint,
+];
