@@ -1,0 +1,14 @@
+import type { ProblemCode, ProblemItem } from '#shared/api/problems.ts';
+
+/** A use case refuses: `code` decides the answer, `detail` says what was wrong with these very values. */
+export class DomainError extends Error {
+  override readonly name = 'DomainError';
+  readonly code: ProblemCode;
+  readonly items: readonly ProblemItem[];
+
+  constructor(code: ProblemCode, detail: string, items: readonly ProblemItem[] = []) {
+    super(detail);
+    this.code = code;
+    this.items = items;
+  }
+}

@@ -1,0 +1,24 @@
+import { randomUUID } from 'node:crypto';
+import type { Request, Response } from 'express';
+import type { Caller } from '#server/domain/caller.ts';
+import { emptyMeter, type Meter } from '#server/domain/meter.ts';
+import type { PersonDocument } from '#server/domain/sessions/sessions.ts';
+
+/** One API call from its first byte to its record: filled in as it goes. */
+export interface Call {
+  readonly id: string;
+  readonly request: Request;
+  readonly response: Response;
+  readonly startedAt: number;
+  readonly startedNs: bigint;
+  readonly meter: Meter;
+  caller: Caller | null;
+  person: PersonDocument | null;
+}
+
+/** Opens a call and names it in the answer's headers. */
+export function openCall(request: Request, response: Response, now: number): Call {
+  const id = randomUUID();
+  response.setHeader('X-Request-Id', id);
+  return { id, request, response, startedAt: now, startedNs: process.hrtime.bigint(), meter: emptyMeter(), caller: null, person: null };
+}

@@ -1,0 +1,23 @@
+import type { Services } from '../services.ts';
+import type { Call } from './call.ts';
+
+/** Writes the call into the history and resolves once that is committed: only then may its answer leave. */
+export function record({ history }: Services, call: Call, route: string, status: number, code: string | null): Promise<void> {
+  const { caller, meter } = call;
+  const refused = status >= 400;
+  return history.append({
+    requestId: call.id,
+    at: call.startedAt,
+    keyId: caller?.keyId ?? null,
+    personId: caller?.personId ?? null,
+    ownerId: caller?.ownerId ?? null,
+    method: call.request.method,
+    route,
+    status,
+    code,
+    durationUs: Number((process.hrtime.bigint() - call.startedNs) / 1000n),
+    attitudes: refused ? 0 : meter.attitudes,
+    warnings: refused ? 0 : meter.warnings,
+    warningCodes: refused ? '' : meter.warningCodes.join(','),
+  });
+}

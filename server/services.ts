@@ -1,0 +1,38 @@
+import path from 'node:path';
+import { mkdir } from 'node:fs/promises';
+import type { Logger } from 'pino';
+import type { Config } from './config.ts';
+import { connect, disconnect, type Database } from './db/database.ts';
+import { apiKeysRepository } from './db/repositories/api-keys.ts';
+import { historyRepository } from './db/repositories/history.ts';
+import { peopleRepository } from './db/repositories/people.ts';
+import { sessionsRepository } from './db/repositories/sessions.ts';
+import type { Clock } from './domain/clock.ts';
+import { KeyRing } from './domain/keys/key-ring.ts';
+import { SessionTokens } from './domain/sessions/session-tokens.ts';
+import { sessionCookie } from './http/cookie.ts';
+
+export interface ServiceOptions {
+  readonly config: Config;
+  readonly logger: Logger;
+  readonly clock?: Clock;
+}
+
+/** Everything that the use cases work on, put together once. */
+export async function createServices({ config, logger, clock = Date.now }: ServiceOptions) {
+  await mkdir(config.dataDirectory, { recursive: true });
+  const database: Database = await connect(path.join(config.dataDirectory, 'dextral.sqlite'));
+  const apiKeys = apiKeysRepository(database);
+  return {
+    config, logger, clock, database, apiKeys,
+    people: peopleRepository(database),
+    sessions: sessionsRepository(database),
+    history: historyRepository(database),
+    keyRing: new KeyRing(apiKeys, clock),
+    tokens: new SessionTokens(config.sessionSecret),
+    cookie: sessionCookie(config.publicUrl),
+    close: () => disconnect(database),
+  };
+}
+
+export type Services = Awaited<ReturnType<typeof createServices>>;
