@@ -31,8 +31,10 @@ for (const [name, command, args] of steps) {
   process.stdout.write(result.stdout ?? '');
   const counted = countOf(result.stdout ?? '');
   // A step without a count of its own is one check: it held or it did not.
-  if (counted === null) result.status === 0 ? passed++ : failed++;
-  else {
+  if (counted === null) {
+    if (result.status === 0) passed++;
+    else failed++;
+  } else {
     passed += counted.passed;
     failed += counted.failed;
     if (result.status !== 0 && counted.failed === 0) failed++;

@@ -14,7 +14,7 @@ type Path = readonly PropertyKey[];
 export function explainIssues(error: z.ZodError, input: unknown, where: 'body' | 'query' | 'path'): HttpProblem {
   const found = error.issues.flatMap((issue) => explain(issue, input, [], where));
   const [first] = found;
-  const rest = found.length > 1 ? ` and ${found.length - 1} more` : '';
+  const rest = found.length > 1 ? `; and ${found.length - 1} more` : '';
   return new HttpProblem(first!.code, `${first!.item.pointer || 'The body'} ${first!.item.message}${rest}.`, found.slice(0, LISTED_AT_MOST).map(({ item }) => item));
 }
 
@@ -41,13 +41,8 @@ function explain(issue: Issue, input: unknown, prefix: Path, where: 'body' | 'qu
       const inner = branch === null ? null : issue.errors[branch];
       if (inner) return inner.flatMap((each) => explain(each, input, path, where));
       if (issue.discriminator !== undefined) {
-        const missing = isObject(value) && value[issue.discriminator] === undefined;
-        const seen = isObject(value) ? value[issue.discriminator] : value;
-        const at = issue.path.at(-1) === issue.discriminator ? path : [...path, issue.discriminator];
-        return [{
-          code: missing ? 'missing-facet' : 'invalid-facet',
-          item: { pointer: point(at), message: missing || seen === undefined ? `is missing; ${REPRESENTATIONS}` : `is ${show(seen)}; ${REPRESENTATIONS}` },
-        }];
+        const missing = value === undefined;
+        return [{ code: missing ? 'missing-facet' : 'invalid-facet', item: { pointer: point(path), message: missing ? `is missing; ${REPRESENTATIONS}` : `is ${show(value)}; ${REPRESENTATIONS}` } }];
       }
       break;
     }
@@ -65,7 +60,7 @@ const REPRESENTATIONS = 'it must be one of "euler", "quaternion", "dcm", "rotati
 function allowedBy(issue: Issue): string {
   switch (issue.code) {
     case 'invalid_value': return issue.message.startsWith('must') ? issue.message : `must be ${issue.values.length === 1 ? '' : 'one of '}${issue.values.map((each) => JSON.stringify(each)).join(', ')}`;
-    case 'invalid_type': return `must be ${article(issue.expected)}`;
+    case 'invalid_type': return issue.message.startsWith('must') ? issue.message : `must be ${article(issue.expected)}`;
     case 'too_small': return issue.message.startsWith('must') ? issue.message : `must be ${issue.inclusive === false ? 'more than' : 'at least'} ${issue.minimum}${issue.origin === 'string' ? ' characters long' : issue.origin === 'array' ? ' entries long' : ''}`;
     case 'too_big': return issue.message.startsWith('must') ? issue.message : `must be ${issue.inclusive === false ? 'less than' : 'at most'} ${issue.maximum}${issue.origin === 'string' ? ' characters long' : issue.origin === 'array' ? ' entries long' : ''}`;
     case 'invalid_format': return issue.message.startsWith('must') ? issue.message : issue.format === 'datetime' ? 'must be a date and time with offset, such as 2026-05-04T08:30:00Z' : `must have the format ${issue.format}`;

@@ -23,7 +23,7 @@ export interface Input<E extends Endpoint> {
 }
 
 type Output<S> = NonNullable<S> extends z.ZodType ? z.output<NonNullable<S>> : undefined;
-type Answer<E extends Endpoint> = E['status'] extends 204 ? void : Output<E['response']>;
+type Answer<E extends Endpoint> = E['status'] extends 204 ? undefined : Output<E['response']>;
 
 /**
  * Mounts an endpoint of the contract. A request goes one way: caller → parsed input → handler → record → answer.

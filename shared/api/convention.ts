@@ -6,13 +6,11 @@ import {
   type Convention,
 } from '../attitude/convention.ts';
 
-const referenceAxes = z.string().refine(isReferenceAxes, {
-  error: 'must be three letters, x then y then z, one of N/S, one of E/W, one of U/D in any order (such as NED, ENU, NWU), or a named frame: ECEF, GCRF, ICRF, EME2000, TEME',
-}).meta({ description: 'Reference axes, x then y then z: NED, ENU, NWU … (one of N/S, one of E/W, one of U/D, in any order), or a named frame such as ECEF.', examples: ['NED'] });
+const referenceAxesError = 'must be three letters, x then y then z, one of N/S, one of E/W, one of U/D in any order (such as NED, ENU, NWU), or a named frame: ECEF, GCRF, ICRF, EME2000, TEME';
+const referenceAxes = z.string({ error: referenceAxesError }).refine(isReferenceAxes, { error: referenceAxesError }).meta({ description: 'Reference axes, x then y then z: NED, ENU, NWU … (one of N/S, one of E/W, one of U/D, in any order), or a named frame such as ECEF.', examples: ['NED'] });
 
-const bodyAxes = z.string().refine(isBodyAxes, {
-  error: 'must be three letters, x then y then z, one of F/B, one of R/L, one of U/D in any order (such as FRD, FLU)',
-}).meta({ description: 'Body axes, x then y then z: FRD, FLU … (one of F/B, one of R/L, one of U/D, in any order).', examples: ['FRD'] });
+const bodyAxesError = 'must be three letters, x then y then z, one of F/B, one of R/L, one of U/D in any order (such as FRD, FLU)';
+const bodyAxes = z.string({ error: bodyAxesError }).refine(isBodyAxes, { error: bodyAxesError }).meta({ description: 'Body axes, x then y then z: FRD, FLU … (one of F/B, one of R/L, one of U/D, in any order).', examples: ['FRD'] });
 
 const between = { reference: referenceAxes, body: bodyAxes };
 const maps = z.enum(MAPS).meta({ description: 'dcm: body-to-reference is v_ref = M v_body. quaternion (hamilton): body-to-reference is v_ref = R(q) v_body. The others: as the Hamilton quaternion (cos a/2, n sin a/2).' });
@@ -20,7 +18,7 @@ const unit = z.enum(ANGLE_UNITS);
 const sign = z.union([z.literal(1), z.literal(-1)], { error: 'must be 1 or -1' });
 const orderError = 'must hold each of 1, 2, 3 once: order[i] is the number of the applied rotation whose angle stands i-th in the list';
 const rotationNumber = z.literal([1, 2, 3], { error: orderError });
-const order = z.tuple([rotationNumber, rotationNumber, rotationNumber])
+const order = z.tuple([rotationNumber, rotationNumber, rotationNumber], { error: orderError })
   .refine((value) => new Set(value).size === 3, { error: orderError })
   .meta({ description: 'order[i] is the number of the applied rotation whose angle stands i-th in the list: [1,2,3] is the order applied.', examples: [[1, 2, 3]] });
 
@@ -30,7 +28,7 @@ export const conventionFacets = z.discriminatedUnion('representation', [
     representation: z.literal('euler'), ...between,
     sequence: z.enum(SEQUENCES).meta({ description: 'Axes of the successive rotations, in the order applied.' }),
     motion: z.enum(MOTIONS), unit, order,
-    signs: z.tuple([sign, sign, sign]).meta({ description: 'Number listed = sign × angle; aligned with the applied order.', examples: [[1, 1, 1]] }),
+    signs: z.tuple([sign, sign, sign], { error: 'must hold three signs, each 1 or -1, aligned with the applied order' }).meta({ description: 'Number listed = sign × angle; aligned with the applied order.', examples: [[1, 1, 1]] }),
     range: z.enum(ANGLE_RANGES).meta({ description: 'Of the first applied angle on output: signed (−180, 180] or positive [0, 360).' }),
   }),
   z.strictObject({

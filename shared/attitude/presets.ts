@@ -8,7 +8,7 @@ export interface Preset {
   readonly convention: Convention;
   /** The open standard that states it; null for one of ours. */
   readonly standard: { readonly name: string; readonly clause: string; readonly checked: 'confirmed' | 'from memory'; readonly note?: string } | null;
-  /** One attitude: nose 030° true, 10° up, right wing 20° down. */
+  /** One attitude: nose 030° true, 10° up, right wing 20° down; each number the double nearest to the exact one. */
   readonly worked: { readonly reading: string; readonly numbers: readonly number[] };
 }
 
@@ -28,7 +28,7 @@ export const AIRCRAFT_PRESETS: readonly Preset[] = [
   {
     id: 'aircraft-euler-rad', title: 'Yaw, pitch, roll in radians', standard: null,
     description: 'As aircraft-euler-deg, in radians. The double nearest to π/2 is not quite a right angle.',
-    convention: euler({ unit: 'rad' }), worked: { reading: READING, numbers: [0.5235987755982988, 0.17453292519943295, 0.3490658503988659] },
+    convention: euler({ unit: 'rad' }), worked: { reading: READING, numbers: [0.5235987755982989, 0.17453292519943295, 0.3490658503988659] },
   },
   {
     id: 'aircraft-euler-rpy-deg', title: 'Roll, pitch, yaw in degrees', standard: null,
@@ -38,13 +38,13 @@ export const AIRCRAFT_PRESETS: readonly Preset[] = [
   {
     id: 'aircraft-euler-rpy-rad', title: 'Roll, pitch, yaw in radians', standard: null,
     description: 'The same rotations as aircraft-euler-rad, listed roll first.',
-    convention: euler({ order: [3, 2, 1], unit: 'rad' }), worked: { reading: READING, numbers: [0.3490658503988659, 0.17453292519943295, 0.5235987755982988] },
+    convention: euler({ order: [3, 2, 1], unit: 'rad' }), worked: { reading: READING, numbers: [0.3490658503988659, 0.17453292519943295, 0.5235987755982989] },
   },
   {
     id: 'aircraft-quaternion', title: 'Quaternion, scalar first', standard: null,
     description: 'Scalar first, Hamilton’s product, turning body components into reference components: q = q_z(yaw) q_y(pitch) q_x(roll).',
     convention: { representation: 'quaternion', reference: 'NED', body: 'FRD', scalar: 'first', product: 'hamilton', maps: 'body-to-reference', sign: 'any' },
-    worked: { reading: READING, numbers: [0.9515485246437885, 0.14487812541736914, 0.1276794405543293, 0.2392983377447303] },
+    worked: { reading: READING, numbers: [0.9515485246437886, 0.14487812541736916, 0.12767944069578066, 0.23929833774473033] },
   },
   {
     id: 'aircraft-dcm', title: 'Direction cosine matrix', standard: null,
@@ -52,7 +52,7 @@ export const AIRCRAFT_PRESETS: readonly Preset[] = [
     convention: { representation: 'dcm', reference: 'NED', body: 'FRD', maps: 'reference-to-body', layout: 'row-major' },
     worked: {
       reading: READING,
-      numbers: [0.8528685319524433, 0.49240387650610395, -0.17364817766693033, -0.4184120444167326, 0.8434932686530727, 0.33682408883346515, 0.3123245560385039, -0.21461017714275565, 0.9254165783983233],
+      numbers: [0.8528685319524432, 0.492403876506104, -0.17364817766693036, -0.4184120444167326, 0.843493268656316, 0.33682408883346515, 0.3123245560187264, -0.21461017714275643, 0.9254165783983234],
     },
   },
 ];

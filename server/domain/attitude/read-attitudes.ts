@@ -63,7 +63,7 @@ class Faults {
   throwIfAny(): void {
     if (this.#code === null) return;
     const [first] = this.#items;
-    const others = this.#count > 1 ? ` and ${this.#count - 1} more` : '';
+    const others = this.#count > 1 ? `; and ${this.#count - 1} more` : '';
     throw new DomainError(this.#code, `${first!.pointer} ${first!.message}${others}.`, this.#items);
   }
 }

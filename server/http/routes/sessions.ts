@@ -15,5 +15,6 @@ export function sessionRoutes(services: Services, router: Router): void {
   mount(services, router, signOutEndpoint)(async ({ caller, call }) => {
     await signOut(services, caller.sessionId!);
     call.response.clearCookie(cookie.name, cookie.options);
+    return undefined;
   });
 }

@@ -1,0 +1,1505 @@
+/* Generated from openapi.yaml by `npm run contract`; do not edit. */
+export interface paths {
+    "/convert": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /**
+         * Convert attitudes between two conventions
+         * @description Up to 10,000 attitudes a call. One bad attitude refuses the batch and names every bad index (first 100). 90 given in degrees is exact gimbal lock; the double nearest to π/2 given in radians is not.
+         *
+         *     Roles: administrator, integrator, engineer.
+         */
+        post: operations["convertAttitudes"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/conventions": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /**
+         * List the presets
+         * @description Roles: administrator, integrator, engineer, reviewer.
+         */
+        get: operations["listConventions"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/conventions/{id}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /**
+         * One preset with every facet
+         * @description Roles: administrator, integrator, engineer, reviewer.
+         */
+        get: operations["getConvention"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/keys": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /**
+         * List API keys, newest first
+         * @description Roles: administrator, integrator (their own), engineer (their own).
+         */
+        get: operations["listKeys"];
+        put?: never;
+        /**
+         * Issue an API key; its secret is in this answer only
+         * @description Roles: administrator.
+         */
+        post: operations["issueKey"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/keys/{id}/revoke": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /**
+         * Revoke an API key; the next call with it is refused
+         * @description Roles: administrator.
+         */
+        post: operations["revokeKey"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/history": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /**
+         * API calls, newest first
+         * @description Every API call is one entry, refused ones included. A person whose role reaches only their own sees the calls of their keys and their own.
+         *
+         *     Roles: administrator, integrator, engineer (their own), reviewer.
+         */
+        get: operations["listHistory"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/sessions": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Sign in; the session is kept in a cookie */
+        post: operations["signIn"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/sessions/current": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /**
+         * Who is signed in
+         * @description For anybody signed in.
+         */
+        get: operations["currentSession"];
+        put?: never;
+        post?: never;
+        /**
+         * Sign out
+         * @description For anybody signed in.
+         */
+        delete: operations["signOut"];
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/health": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Whether the service answers and can write */
+        get: operations["health"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+}
+export type webhooks = Record<string, never>;
+export interface components {
+    schemas: {
+        ApiKey: {
+            id: string;
+            name: string;
+            /** @description The part of the key that may be shown; enough to recognise it. */
+            prefix: string;
+            role: components["schemas"]["Role"];
+            /**
+             * Format: date-time
+             * @example 2026-05-04T08:30:00.000Z
+             */
+            createdAt: string;
+            createdBy: {
+                id: string;
+                name: string;
+            };
+            expiresAt: string | null;
+            lastUsedAt: string | null;
+            revokedAt: string | null;
+        };
+        /** @description Every facet, a preset id, or a published interface version. */
+        Convention: components["schemas"]["ConventionFacets"] | components["schemas"]["PresetReference"] | components["schemas"]["InterfaceReference"];
+        /** @description A convention with every facet stated. Nothing has a default. */
+        ConventionFacets: {
+            /** @constant */
+            representation: "euler";
+            /**
+             * @description Reference axes, x then y then z: NED, ENU, NWU … (one of N/S, one of E/W, one of U/D, in any order), or a named frame such as ECEF.
+             * @example NED
+             */
+            reference: string;
+            /**
+             * @description Body axes, x then y then z: FRD, FLU … (one of F/B, one of R/L, one of U/D, in any order).
+             * @example FRD
+             */
+            body: string;
+            /**
+             * @description Axes of the successive rotations, in the order applied.
+             * @enum {string}
+             */
+            sequence: "XYZ" | "YZX" | "ZXY" | "XZY" | "YXZ" | "ZYX" | "XYX" | "XZX" | "YXY" | "YZY" | "ZXZ" | "ZYZ";
+            /** @enum {string} */
+            motion: "intrinsic" | "extrinsic";
+            /** @enum {string} */
+            unit: "deg" | "rad";
+            /**
+             * @description order[i] is the number of the applied rotation whose angle stands i-th in the list: [1,2,3] is the order applied.
+             * @example [
+             *       1,
+             *       2,
+             *       3
+             *     ]
+             */
+            order: [
+                1 | 2 | 3,
+                1 | 2 | 3,
+                1 | 2 | 3
+            ];
+            /**
+             * @description Number listed = sign × angle; aligned with the applied order.
+             * @example [
+             *       1,
+             *       1,
+             *       1
+             *     ]
+             */
+            signs: [
+                1 | -1,
+                1 | -1,
+                1 | -1
+            ];
+            /**
+             * @description Of the first applied angle on output: signed (−180, 180] or positive [0, 360).
+             * @enum {string}
+             */
+            range: "signed" | "positive";
+        } | {
+            /** @constant */
+            representation: "quaternion";
+            /**
+             * @description Reference axes, x then y then z: NED, ENU, NWU … (one of N/S, one of E/W, one of U/D, in any order), or a named frame such as ECEF.
+             * @example NED
+             */
+            reference: string;
+            /**
+             * @description Body axes, x then y then z: FRD, FLU … (one of F/B, one of R/L, one of U/D, in any order).
+             * @example FRD
+             */
+            body: string;
+            /** @enum {string} */
+            scalar: "first" | "last";
+            /** @enum {string} */
+            product: "hamilton" | "shuster";
+            /**
+             * @description dcm: body-to-reference is v_ref = M v_body. quaternion (hamilton): body-to-reference is v_ref = R(q) v_body. The others: as the Hamilton quaternion (cos a/2, n sin a/2).
+             * @enum {string}
+             */
+            maps: "body-to-reference" | "reference-to-body";
+            /**
+             * @description Binds output only.
+             * @enum {string}
+             */
+            sign: "any" | "scalar-non-negative" | "continuous";
+        } | {
+            /** @constant */
+            representation: "dcm";
+            /**
+             * @description Reference axes, x then y then z: NED, ENU, NWU … (one of N/S, one of E/W, one of U/D, in any order), or a named frame such as ECEF.
+             * @example NED
+             */
+            reference: string;
+            /**
+             * @description Body axes, x then y then z: FRD, FLU … (one of F/B, one of R/L, one of U/D, in any order).
+             * @example FRD
+             */
+            body: string;
+            /**
+             * @description dcm: body-to-reference is v_ref = M v_body. quaternion (hamilton): body-to-reference is v_ref = R(q) v_body. The others: as the Hamilton quaternion (cos a/2, n sin a/2).
+             * @enum {string}
+             */
+            maps: "body-to-reference" | "reference-to-body";
+            /** @enum {string} */
+            layout: "row-major" | "column-major";
+        } | {
+            /** @constant */
+            representation: "rotation-vector";
+            /**
+             * @description Reference axes, x then y then z: NED, ENU, NWU … (one of N/S, one of E/W, one of U/D, in any order), or a named frame such as ECEF.
+             * @example NED
+             */
+            reference: string;
+            /**
+             * @description Body axes, x then y then z: FRD, FLU … (one of F/B, one of R/L, one of U/D, in any order).
+             * @example FRD
+             */
+            body: string;
+            /**
+             * @description dcm: body-to-reference is v_ref = M v_body. quaternion (hamilton): body-to-reference is v_ref = R(q) v_body. The others: as the Hamilton quaternion (cos a/2, n sin a/2).
+             * @enum {string}
+             */
+            maps: "body-to-reference" | "reference-to-body";
+            /** @enum {string} */
+            unit: "deg" | "rad";
+        } | {
+            /** @constant */
+            representation: "axis-angle";
+            /**
+             * @description Reference axes, x then y then z: NED, ENU, NWU … (one of N/S, one of E/W, one of U/D, in any order), or a named frame such as ECEF.
+             * @example NED
+             */
+            reference: string;
+            /**
+             * @description Body axes, x then y then z: FRD, FLU … (one of F/B, one of R/L, one of U/D, in any order).
+             * @example FRD
+             */
+            body: string;
+            /**
+             * @description dcm: body-to-reference is v_ref = M v_body. quaternion (hamilton): body-to-reference is v_ref = R(q) v_body. The others: as the Hamilton quaternion (cos a/2, n sin a/2).
+             * @enum {string}
+             */
+            maps: "body-to-reference" | "reference-to-body";
+            /** @enum {string} */
+            unit: "deg" | "rad";
+        } | {
+            /** @constant */
+            representation: "mrp";
+            /**
+             * @description Reference axes, x then y then z: NED, ENU, NWU … (one of N/S, one of E/W, one of U/D, in any order), or a named frame such as ECEF.
+             * @example NED
+             */
+            reference: string;
+            /**
+             * @description Body axes, x then y then z: FRD, FLU … (one of F/B, one of R/L, one of U/D, in any order).
+             * @example FRD
+             */
+            body: string;
+            /**
+             * @description dcm: body-to-reference is v_ref = M v_body. quaternion (hamilton): body-to-reference is v_ref = R(q) v_body. The others: as the Hamilton quaternion (cos a/2, n sin a/2).
+             * @enum {string}
+             */
+            maps: "body-to-reference" | "reference-to-body";
+            /** @enum {string} */
+            shadow: "inside" | "any";
+        } | {
+            /** @constant */
+            representation: "gibbs";
+            /**
+             * @description Reference axes, x then y then z: NED, ENU, NWU … (one of N/S, one of E/W, one of U/D, in any order), or a named frame such as ECEF.
+             * @example NED
+             */
+            reference: string;
+            /**
+             * @description Body axes, x then y then z: FRD, FLU … (one of F/B, one of R/L, one of U/D, in any order).
+             * @example FRD
+             */
+            body: string;
+            /**
+             * @description dcm: body-to-reference is v_ref = M v_body. quaternion (hamilton): body-to-reference is v_ref = R(q) v_body. The others: as the Hamilton quaternion (cos a/2, n sin a/2).
+             * @enum {string}
+             */
+            maps: "body-to-reference" | "reference-to-body";
+        };
+        ConvertInput: {
+            from: components["schemas"]["Convention"];
+            to: components["schemas"]["Convention"];
+            /** @description One array of numbers per attitude, in the count and order that the convention states. A row-major matrix may also stand as three rows of three. */
+            attitudes: (number | number[])[][];
+            options?: {
+                /** @description Also say each attitude in a plain sentence. */
+                readings?: boolean;
+                /**
+                 * @description What to do with numbers that are no rotation by more than 1e-6: refuse them (none, the policy when absent) or take the nearest rotation.
+                 * @enum {string}
+                 */
+                repair?: "none" | "nearest";
+                /** @description Warn when an attitude comes closer to gimbal lock than this; 1° when absent. */
+                warnWithinDeg?: number;
+            };
+        };
+        ConvertOutput: {
+            attitudes: number[][];
+            from: components["schemas"]["ConventionFacets"];
+            to: components["schemas"]["ConventionFacets"];
+            warnings: components["schemas"]["Warning"][];
+            /** @description The attitude nearest to gimbal lock, where a warning tells of one. */
+            worst?: components["schemas"]["WorstCase"];
+            readings?: string[];
+            /** @description Name and version of the numerical core that answered. */
+            engine: string;
+        };
+        HistoryEntry: {
+            /** @description The request id, as in the X-Request-Id header of the answer. */
+            id: string;
+            /**
+             * Format: date-time
+             * @example 2026-05-04T08:30:00.000Z
+             */
+            at: string;
+            key: {
+                id: string;
+                name: string;
+                prefix: string;
+            } | null;
+            person: {
+                id: string;
+                name: string;
+            } | null;
+            method: string;
+            route: string;
+            status: number;
+            /** @description The problem code of a refused call. */
+            code: string | null;
+            durationMs: number;
+            attitudes: number;
+            /** @description Attitudes that a warning was given for. */
+            warnings: number;
+            warningCodes: string[];
+        };
+        /** @description A published interface version. */
+        InterfaceReference: {
+            interface: string;
+            version: number;
+        };
+        IssueKeyInput: {
+            name: string;
+            role: components["schemas"]["Role"];
+            /** @description When the key stops working by itself; null for never. */
+            expiresAt: string | null;
+        };
+        Person: {
+            id: string;
+            name: string;
+            email: string;
+            role: components["schemas"]["Role"];
+        };
+        Preset: {
+            id: string;
+            title: string;
+            description: string;
+            convention: components["schemas"]["ConventionFacets"];
+            /** @description The open standard that states this convention; null for one of ours. */
+            standard: {
+                name: string;
+                clause: string;
+                /**
+                 * @description Whether the entry was compared with the text of the standard.
+                 * @enum {string}
+                 */
+                checked: "confirmed" | "from memory";
+                note?: string;
+            } | null;
+            /** @description One attitude in this convention: nose 030° true, 10° up, right wing 20° down. */
+            worked: {
+                reading: string;
+                numbers: number[];
+            };
+            /** @description Published interface versions that state this convention. */
+            interfaces: {
+                interface: string;
+                version: number;
+            }[];
+        };
+        /** @description A preset by its id; see GET /conventions. */
+        PresetReference: {
+            /** @example aircraft-euler-deg */
+            preset: string;
+        };
+        /** @enum {string} */
+        Role: "administrator" | "integrator" | "engineer" | "reviewer";
+        SignInInput: {
+            email: string;
+            password: string;
+        };
+        SignedIn: {
+            person: components["schemas"]["Person"];
+        };
+        Warning: {
+            /** @enum {string} */
+            code: "near-gimbal-lock" | "severe-gimbal-lock" | "gimbal-lock" | "renormalised" | "reorthonormalised";
+            message: string;
+            count: number;
+            /** @description The first 100. */
+            indices: number[];
+            worst: components["schemas"]["WorstCase"];
+        };
+        WorstCase: {
+            index: number;
+            /** @description κ = 1/|cos(middle angle)| (1/|sin| where the first and third axes are the same): an attitude error δ shows up as at most κ·δ in the first and last angle. null at exact lock. */
+            condition?: number | null;
+            /** @description log10 κ; null at exact lock. */
+            digitsLost?: number | null;
+            /** @description Angle left to gimbal lock, in degrees. */
+            marginDeg?: number;
+            /** @description The combination of first and last applied angle that stays well conditioned near lock. */
+            wellConditioned?: {
+                /** @enum {string} */
+                combination: "first-minus-last" | "first-plus-last";
+                angle: number;
+                /** @enum {string} */
+                unit: "deg" | "rad";
+            };
+            /** @description Norm defect of a quaternion or orthogonality defect of a matrix that was repaired. */
+            defect?: number;
+        };
+        /** @description What was wrong (RFC 9457). `code` is stable; branch on it. */
+        Problem: {
+            /** @example /problems/missing-facet */
+            type: string;
+            title: string;
+            status: number;
+            detail: string;
+            /** @description Names the call by its request id. */
+            instance: string;
+            /** @enum {string} */
+            code: "malformed-json" | "malformed-request" | "invalid-cursor" | "missing-key" | "invalid-key" | "revoked-key" | "expired-key" | "not-signed-in" | "wrong-credentials" | "not-allowed" | "cross-site" | "unknown-route" | "not-found" | "unknown-preset" | "unknown-interface" | "method-not-allowed" | "conflict" | "already-revoked" | "body-too-large" | "batch-too-large" | "unsupported-media-type" | "unsupported-encoding" | "missing-facet" | "unknown-facet" | "invalid-facet" | "missing-field" | "unknown-field" | "invalid-field" | "count-mismatch" | "not-a-number" | "not-finite" | "zero-norm" | "not-a-rotation" | "improper-axes" | "unrelated-frames" | "not-representable" | "invalid-convention" | "too-many-requests" | "internal" | "not-recorded";
+            errors: {
+                /** @description JSON pointer into the body, or ?name for a query parameter. */
+                pointer: string;
+                message: string;
+            }[];
+        };
+    };
+    responses: never;
+    parameters: never;
+    requestBodies: never;
+    headers: never;
+    pathItems: never;
+}
+export type $defs = Record<string, never>;
+export interface operations {
+    convertAttitudes: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                /**
+                 * @example {
+                 *       "from": {
+                 *         "preset": "aircraft-euler-deg"
+                 *       },
+                 *       "to": {
+                 *         "preset": "aircraft-quaternion"
+                 *       },
+                 *       "attitudes": [
+                 *         [
+                 *           30,
+                 *           10,
+                 *           20
+                 *         ]
+                 *       ],
+                 *       "options": {
+                 *         "readings": true
+                 *       }
+                 *     }
+                 */
+                "application/json": components["schemas"]["ConvertInput"];
+            };
+        };
+        responses: {
+            /** @description OK */
+            200: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ConvertOutput"];
+                };
+            };
+            /** @description Bad Request. Codes: malformed-json, malformed-request, invalid-cursor. */
+            400: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Unauthorized. Codes: missing-key, invalid-key, revoked-key, expired-key, not-signed-in, wrong-credentials. */
+            401: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Forbidden. Codes: not-allowed, cross-site. */
+            403: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Payload Too Large. Codes: body-too-large, batch-too-large. */
+            413: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Unsupported Media Type. Codes: unsupported-media-type, unsupported-encoding. */
+            415: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Unprocessable Entity. Codes: unknown-preset, unknown-interface, missing-facet, unknown-facet, invalid-facet, missing-field, unknown-field, invalid-field, count-mismatch, not-a-number, not-finite, zero-norm, not-a-rotation, improper-axes, unrelated-frames, not-representable, invalid-convention. */
+            422: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Internal Server Error. Codes: internal. */
+            500: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Service Unavailable. Codes: not-recorded. */
+            503: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    listConventions: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            /** @description OK */
+            200: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        items: components["schemas"]["Preset"][];
+                    };
+                };
+            };
+            /** @description Unauthorized. Codes: missing-key, invalid-key, revoked-key, expired-key, not-signed-in, wrong-credentials. */
+            401: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Forbidden. Codes: not-allowed, cross-site. */
+            403: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Internal Server Error. Codes: internal. */
+            500: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Service Unavailable. Codes: not-recorded. */
+            503: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    getConvention: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            /** @description OK */
+            200: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["Preset"];
+                };
+            };
+            /** @description Unauthorized. Codes: missing-key, invalid-key, revoked-key, expired-key, not-signed-in, wrong-credentials. */
+            401: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Forbidden. Codes: not-allowed, cross-site. */
+            403: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Not Found. Codes: unknown-route, not-found. */
+            404: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Internal Server Error. Codes: internal. */
+            500: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Service Unavailable. Codes: not-recorded. */
+            503: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    listKeys: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            /** @description OK */
+            200: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        items: components["schemas"]["ApiKey"][];
+                    };
+                };
+            };
+            /** @description Unauthorized. Codes: missing-key, invalid-key, revoked-key, expired-key, not-signed-in, wrong-credentials. */
+            401: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Forbidden. Codes: not-allowed, cross-site. */
+            403: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Internal Server Error. Codes: internal. */
+            500: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    issueKey: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                /**
+                 * @example {
+                 *       "name": "Attitude pipeline",
+                 *       "role": "engineer",
+                 *       "expiresAt": null
+                 *     }
+                 */
+                "application/json": components["schemas"]["IssueKeyInput"];
+            };
+        };
+        responses: {
+            /** @description Created */
+            201: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        key: components["schemas"]["ApiKey"];
+                        secret: string;
+                    };
+                };
+            };
+            /** @description Bad Request. Codes: malformed-json, malformed-request, invalid-cursor. */
+            400: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Unauthorized. Codes: missing-key, invalid-key, revoked-key, expired-key, not-signed-in, wrong-credentials. */
+            401: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Forbidden. Codes: not-allowed, cross-site. */
+            403: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Payload Too Large. Codes: body-too-large, batch-too-large. */
+            413: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Unsupported Media Type. Codes: unsupported-media-type, unsupported-encoding. */
+            415: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Unprocessable Entity. Codes: unknown-preset, unknown-interface, missing-facet, unknown-facet, invalid-facet, missing-field, unknown-field, invalid-field, count-mismatch, not-a-number, not-finite, zero-norm, not-a-rotation, improper-axes, unrelated-frames, not-representable, invalid-convention. */
+            422: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Internal Server Error. Codes: internal. */
+            500: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Service Unavailable. Codes: not-recorded. */
+            503: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    revokeKey: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            /** @description OK */
+            200: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        key: components["schemas"]["ApiKey"];
+                    };
+                };
+            };
+            /** @description Unauthorized. Codes: missing-key, invalid-key, revoked-key, expired-key, not-signed-in, wrong-credentials. */
+            401: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Forbidden. Codes: not-allowed, cross-site. */
+            403: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Not Found. Codes: unknown-route, not-found. */
+            404: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Conflict. Codes: conflict, already-revoked. */
+            409: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Internal Server Error. Codes: internal. */
+            500: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Service Unavailable. Codes: not-recorded. */
+            503: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    listHistory: {
+        parameters: {
+            query?: {
+                /** @description As given by the page before. */
+                cursor?: string;
+                /** @description Rows a page, 1 to 200; 50 when absent. */
+                limit?: string;
+                /** @description API key id. */
+                key?: string;
+                /** @description As in the entries, such as /api/v1/convert. */
+                route?: string;
+                status?: string;
+                /** @description Not before this time. */
+                from?: string;
+                /** @description Before this time. */
+                to?: string;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            /** @description OK */
+            200: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        items: components["schemas"]["HistoryEntry"][];
+                        /** @description Give it as `cursor` for the next page; null on the last. */
+                        nextCursor: string | null;
+                        /** @description Routes that the caller’s history holds, for filtering. */
+                        routes: string[];
+                    };
+                };
+            };
+            /** @description Bad Request. Codes: malformed-json, malformed-request, invalid-cursor. */
+            400: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Unauthorized. Codes: missing-key, invalid-key, revoked-key, expired-key, not-signed-in, wrong-credentials. */
+            401: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Forbidden. Codes: not-allowed, cross-site. */
+            403: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Unprocessable Entity. Codes: unknown-preset, unknown-interface, missing-facet, unknown-facet, invalid-facet, missing-field, unknown-field, invalid-field, count-mismatch, not-a-number, not-finite, zero-norm, not-a-rotation, improper-axes, unrelated-frames, not-representable, invalid-convention. */
+            422: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Internal Server Error. Codes: internal. */
+            500: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Service Unavailable. Codes: not-recorded. */
+            503: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    signIn: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["SignInInput"];
+            };
+        };
+        responses: {
+            /** @description Created */
+            201: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["SignedIn"];
+                };
+            };
+            /** @description Bad Request. Codes: malformed-json, malformed-request, invalid-cursor. */
+            400: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Unauthorized. Codes: missing-key, invalid-key, revoked-key, expired-key, not-signed-in, wrong-credentials. */
+            401: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Forbidden. Codes: not-allowed, cross-site. */
+            403: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Payload Too Large. Codes: body-too-large, batch-too-large. */
+            413: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Unsupported Media Type. Codes: unsupported-media-type, unsupported-encoding. */
+            415: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Unprocessable Entity. Codes: unknown-preset, unknown-interface, missing-facet, unknown-facet, invalid-facet, missing-field, unknown-field, invalid-field, count-mismatch, not-a-number, not-finite, zero-norm, not-a-rotation, improper-axes, unrelated-frames, not-representable, invalid-convention. */
+            422: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Too Many Requests. Codes: too-many-requests. */
+            429: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Internal Server Error. Codes: internal. */
+            500: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Service Unavailable. Codes: not-recorded. */
+            503: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    currentSession: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            /** @description OK */
+            200: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["SignedIn"];
+                };
+            };
+            /** @description Unauthorized. Codes: missing-key, invalid-key, revoked-key, expired-key, not-signed-in, wrong-credentials. */
+            401: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Internal Server Error. Codes: internal. */
+            500: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    signOut: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            /** @description No Content */
+            204: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Unauthorized. Codes: missing-key, invalid-key, revoked-key, expired-key, not-signed-in, wrong-credentials. */
+            401: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Forbidden. Codes: not-allowed, cross-site. */
+            403: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Internal Server Error. Codes: internal. */
+            500: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Service Unavailable. Codes: not-recorded. */
+            503: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    health: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            /** @description OK */
+            200: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        /** @constant */
+                        status: "ok";
+                        engine: string;
+                    };
+                };
+            };
+            /** @description Internal Server Error. Codes: internal. */
+            500: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Service Unavailable. Codes: not-recorded. */
+            503: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+}
