@@ -27,6 +27,7 @@ export default tseslint.config(
     },
   },
   { files: ['**/*.{js,mjs}'], languageOptions: { globals: globals.node } },
+  { files: ['web/public/**/*.js'], languageOptions: { globals: globals.browser, sourceType: 'script' } },
   {
     files: ['shared/attitude/**/*.ts'],
     rules: forbid(['^(?!\\.\\.?/)', 'shared/attitude imports only itself.'], noServer, noWeb, noTests, [['**/api/**'], 'shared/attitude imports only itself.']),

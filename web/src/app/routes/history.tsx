@@ -1,0 +1,38 @@
+import { useQuery } from '@tanstack/react-query';
+import { useState } from 'react';
+import { Button } from '../../components/button.tsx';
+import { EmptyState } from '../../components/empty-state.tsx';
+import { ProblemNotice } from '../../components/notice.tsx';
+import { PageHeading } from '../../components/page-heading.tsx';
+import { Skeleton } from '../../components/skeleton.tsx';
+import { historyQuery, type HistoryEntry } from '../../features/history/api/history.ts';
+import { useHistoryFilter } from '../../features/history/api/use-history-filter.ts';
+import { HistoryFilters } from '../../features/history/components/history-filters.tsx';
+import { HistoryTable } from '../../features/history/components/history-table.tsx';
+import { RecordDialog } from '../../features/history/components/record-dialog.tsx';
+import { keysQuery } from '../../features/keys/api/keys.ts';
+import { sessionQuery } from '../../features/session/api/session.ts';
+
+export function Component() {
+  const [filter, change] = useHistoryFilter();
+  const { data: person } = useQuery(sessionQuery);
+  const { data: page, error, isPending } = useQuery(historyQuery(filter));
+  const { data: keys = [] } = useQuery({ ...keysQuery, enabled: person !== undefined && person.role !== 'reviewer' });
+  const [opened, setOpened] = useState<HistoryEntry | null>(null);
+  return (
+    <>
+      <PageHeading title="Request history">
+        Every API call, refused ones included: what the service has answered is here before the answer leaves it.
+      </PageHeading>
+      <HistoryFilters filter={filter} onChange={change} keys={keys} routes={page?.routes ?? []} />
+      {isPending ? <Skeleton label="Fetching the history" lines={12} /> : error ? <ProblemNotice error={error} />
+        : page.items.length === 0 ? <EmptyState title="No calls here">Nothing matches the filter, or nothing has been called yet.</EmptyState>
+          : <HistoryTable entries={page.items} onOpen={setOpened} />}
+      <div className="mt-4 flex justify-between gap-3">
+        <Button disabled={filter.cursor === ''} onClick={() => change({ cursor: '' })}>Newest</Button>
+        <Button disabled={!page?.nextCursor} onClick={() => change({ cursor: page!.nextCursor! })}>Older</Button>
+      </div>
+      {opened && <RecordDialog entry={opened} onClose={() => setOpened(null)} />}
+    </>
+  );
+}
