@@ -19,6 +19,10 @@ export async function authenticate(services: Services, endpoint: Endpoint, call:
     refuseCrossSite(request, services.config.publicUrl);
     return;
   }
+  if (endpoint.auth === 'visitor') {
+    await resume(services, call);
+    return;
+  }
   if (header !== undefined) await byKey(services, endpoint, call, header);
   else await bySession(services, endpoint, call);
   if (endpoint.permission) scopeOf(call.caller!, endpoint.permission);
@@ -37,10 +41,15 @@ async function byKey(services: Services, endpoint: Endpoint, call: Call, header:
 }
 
 async function bySession(services: Services, endpoint: Endpoint, call: Call): Promise<void> {
+  if (!(await resume(services, call))) throw endpoint.auth === 'session' ? new HttpProblem('not-signed-in', 'Nobody is signed in, or the session has ended.') : missingKey();
+  refuseCrossSite(call.request, services.config.publicUrl);
+}
+
+/** Takes up the session of the request's cookie; false where there is none that is still good. */
+async function resume(services: Services, call: Call): Promise<boolean> {
   const token = parseCookies(call.request.headers.cookie ?? '')[services.cookie.name];
   const session = token === undefined ? null : await resumeSession(services, token);
-  if (!session) throw endpoint.auth === 'session' ? new HttpProblem('not-signed-in', 'Nobody is signed in, or the session has ended.') : missingKey();
-  refuseCrossSite(call.request, services.config.publicUrl);
-  call.caller = session.caller;
-  call.person = session.person;
+  call.caller = session?.caller ?? null;
+  call.person = session?.person ?? null;
+  return session !== null;
 }

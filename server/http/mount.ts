@@ -17,7 +17,7 @@ export interface Input<E extends Endpoint> {
   readonly params: Output<E['params']>;
   readonly query: Output<E['query']>;
   readonly body: Output<E['body']>;
-  readonly caller: E['auth'] extends 'public' ? null : Caller;
+  readonly caller: E['auth'] extends 'public' | 'visitor' ? Caller | null : Caller;
   readonly meter: Meter;
   readonly call: Call;
 }
@@ -67,7 +67,7 @@ export async function refuse(services: Services, call: Call, route: string, erro
 
 /** A console reading its own lists is no API call; everything with a key is, and so is computing. */
 function recorded(endpoint: Endpoint, call: Call): boolean {
-  return endpoint.auth !== 'public' && (call.caller?.kind === 'key' || endpoint.recordsSessions === true);
+  return endpoint.auth !== 'public' && endpoint.auth !== 'visitor' && (call.caller?.kind === 'key' || endpoint.recordsSessions === true);
 }
 
 async function parseInput(endpoint: Endpoint, call: Call) {

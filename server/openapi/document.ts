@@ -40,7 +40,7 @@ function operationOf(endpoint: Endpoint, schemas: SchemaCollection): Record<stri
     tags: [endpoint.tag],
     summary: endpoint.summary,
     description: [endpoint.description, whoMay(endpoint)].filter(Boolean).join('\n\n'),
-    security: endpoint.auth === 'public' ? [] : endpoint.auth === 'session' ? [{ session: [] }] : [{ apiKey: [] }, { session: [] }],
+    security: endpoint.auth === 'public' || endpoint.auth === 'visitor' ? [] : endpoint.auth === 'session' ? [{ session: [] }] : [{ apiKey: [] }, { session: [] }],
     ...(parameters.length > 0 ? { parameters } : {}),
     ...(endpoint.body ? { requestBody: { required: true, content: { 'application/json': { schema: schemas.of(endpoint.body, 'input'), ...(endpoint.example === undefined ? {} : { example: endpoint.example }) } } } } : {}),
     responses: responsesOf(endpoint, schemas),
@@ -48,7 +48,7 @@ function operationOf(endpoint: Endpoint, schemas: SchemaCollection): Record<stri
 }
 
 function whoMay({ auth, permission }: Endpoint): string {
-  if (auth === 'public') return '';
+  if (auth === 'public' || auth === 'visitor') return '';
   if (!permission) return 'For anybody signed in.';
   const roles = ROLES.filter((role) => PERMISSIONS[permission][role] !== 'none').map((role) => `${role}${PERMISSIONS[permission][role] === 'own' ? ' (their own)' : ''}`);
   return `Roles: ${roles.join(', ')}.`;

@@ -18,8 +18,8 @@ export interface Endpoint<
   readonly tag: 'Attitude' | 'Conventions' | 'Keys' | 'History' | 'Session' | 'Health';
   readonly summary: string;
   readonly description?: string;
-  /** `public` needs nothing; `caller` an API key or a session; `session` a person signed in to the console. */
-  readonly auth: 'public' | 'caller' | 'session';
+  /** `public` needs nothing; `visitor` takes a session where there is one; `caller` needs an API key or a session; `session` a person signed in to the console. */
+  readonly auth: 'public' | 'visitor' | 'caller' | 'session';
   readonly permission?: Permission;
   readonly params?: Params;
   readonly query?: Query;

@@ -1,6 +1,6 @@
-import { QueryTypes } from 'sequelize';
 import type { Database } from '../database.ts';
 import type { ApiKeyRow } from '../models/api-key.ts';
+import { select } from '../select.ts';
 
 /** A key with the name of whoever issued it. */
 export type ListedKey = ApiKeyRow & { readonly createdByName: string };
@@ -23,11 +23,8 @@ const LISTED = `
 export function apiKeysRepository({ sequelize, apiKeys, writes }: Database): ApiKeysRepository {
   return {
     bySecretHash: async (secretHash) => (await apiKeys.findOne({ where: { secretHash } }))?.get() ?? null,
-    byId: async (id) => (await sequelize.query<ListedKey>(`${LISTED} WHERE k.id = $id`, { bind: { id }, type: QueryTypes.SELECT }))[0] ?? null,
-    list: (ownerId) => sequelize.query<ListedKey>(
-      `${LISTED} ${ownerId === null ? '' : 'WHERE k.owner_id = $ownerId'} ORDER BY k.created_at DESC, k.id`,
-      { bind: { ownerId }, type: QueryTypes.SELECT },
-    ),
+    byId: async (id) => (await select<ListedKey>(sequelize, `${LISTED} WHERE k.id = $id`, { id }))[0] ?? null,
+    list: (ownerId) => select<ListedKey>(sequelize, `${LISTED} ${ownerId === null ? '' : 'WHERE k.owner_id = $ownerId'} ORDER BY k.created_at DESC, k.id`, { ownerId }),
     insert: (key) => writes.run(async (transaction) => {
       await apiKeys.create(key, { transaction });
     }),

@@ -1,6 +1,6 @@
-import { QueryTypes } from 'sequelize';
 import type { Database } from '../database.ts';
 import type { RequestRow } from '../models/request.ts';
+import { select } from '../select.ts';
 import type { NewRequest } from './store-requests.ts';
 
 export interface HistoryFilter {
@@ -32,28 +32,28 @@ export function historyRepository({ sequelize, writes }: Database): HistoryRepos
     append: (row) => writes.append(row),
     page: (filter) => {
       const { where, values } = conditionsOf(filter);
-      return sequelize.query<HistoryRow>(`
+      return select<HistoryRow>(sequelize, `
         SELECT r.id, r.request_id AS requestId, r.at, r.key_id AS keyId, r.person_id AS personId, r.owner_id AS ownerId, r.method, r.route,
           r.status, r.code, r.duration_us AS durationUs, r.attitudes, r.warnings, r.warning_codes AS warningCodes,
           k.name AS keyName, k.prefix AS keyPrefix, p.name AS personName
         FROM requests r LEFT JOIN api_keys k ON k.id = r.key_id LEFT JOIN people p ON p.id = r.person_id
-        ${where} ORDER BY r.id DESC LIMIT $limit`, { bind: values, type: QueryTypes.SELECT });
+        ${where} ORDER BY r.id DESC LIMIT $limit`, values);
     },
     routes: async (ownerId) => {
       // A walk over the index from one route to the next: DISTINCT would read every row.
-      const rows = await sequelize.query<{ route: string }>(`
+      const rows = await select<{ route: string }>(sequelize, `
         WITH RECURSIVE seen(route) AS (
           SELECT MIN(route) FROM requests
           UNION ALL SELECT (SELECT MIN(route) FROM requests WHERE route > seen.route) FROM seen WHERE seen.route IS NOT NULL
         ) SELECT route FROM seen WHERE route IS NOT NULL
         ${ownerId === null ? '' : 'AND EXISTS (SELECT 1 FROM requests r WHERE r.route = seen.route AND r.owner_id = $ownerId)'}`,
-      { bind: { ownerId }, type: QueryTypes.SELECT });
+      { ownerId });
       return rows.map(({ route }) => route);
     },
   };
 }
 
-function conditionsOf(filter: HistoryFilter): { where: string; values: Record<string, unknown> } {
+function conditionsOf(filter: HistoryFilter): { where: string; values: Record<string, string | number | null | undefined> } {
   const { ownerId, keyId, route, status, from, to, before, limit } = filter;
   const conditions = [
     ownerId !== null && 'r.owner_id = $ownerId',

@@ -11,7 +11,7 @@ export function sessionRoutes(services: Services, router: Router): void {
     call.response.cookie(cookie.name, token, { ...cookie.options, expires: new Date(expiresAt) });
     return { person };
   });
-  mount(services, router, currentSessionEndpoint)(({ call }) => ({ person: call.person! }));
+  mount(services, router, currentSessionEndpoint)(({ call }) => ({ person: call.person }));
   mount(services, router, signOutEndpoint)(async ({ caller, call }) => {
     await signOut(services, caller.sessionId!);
     call.response.clearCookie(cookie.name, cookie.options);

@@ -6,7 +6,6 @@ import { sessionQuery, type Person } from '../features/session/api/session.ts';
 import { Mark } from '../components/mark.tsx';
 import { ProblemNotice } from '../components/notice.tsx';
 import { TitleBlock } from '../components/title-block.tsx';
-import { ApiError } from '../lib/api-error.ts';
 import { date } from '../lib/format.ts';
 import { SHEETS, sheetAt } from './sheets.ts';
 
@@ -15,10 +14,8 @@ export function Layout() {
   const location = useLocation();
   const { data: person, error, isPending } = useQuery(sessionQuery);
   if (isPending) return null;
-  if (error instanceof ApiError && error.code === 'not-signed-in') {
-    return <Navigate to={`/sign-in?next=${encodeURIComponent(location.pathname + location.search)}`} replace />;
-  }
   if (error) return <main className="mx-auto max-w-xl p-6"><ProblemNotice error={error} /></main>;
+  if (person === null) return <Navigate to={`/sign-in?next=${encodeURIComponent(location.pathname + location.search)}`} replace />;
   return <SheetFrame person={person} />;
 }
 

@@ -152,10 +152,7 @@ export interface paths {
             path?: never;
             cookie?: never;
         };
-        /**
-         * Who is signed in
-         * @description For anybody signed in.
-         */
+        /** Who is signed in, if anybody */
         get: operations["currentSession"];
         put?: never;
         post?: never;
@@ -1363,18 +1360,9 @@ export interface operations {
                     [name: string]: unknown;
                 };
                 content: {
-                    "application/json": components["schemas"]["SignedIn"];
-                };
-            };
-            /** @description Unauthorized. Codes: missing-key, invalid-key, revoked-key, expired-key, not-signed-in, wrong-credentials. */
-            401: {
-                headers: {
-                    /** @description The id of this call in the history. */
-                    "X-Request-Id"?: string;
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["Problem"];
+                    "application/json": {
+                        person: components["schemas"]["Person"] | null;
+                    };
                 };
             };
             /** @description Internal Server Error. Codes: internal. */

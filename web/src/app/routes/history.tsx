@@ -17,7 +17,7 @@ export function Component() {
   const [filter, change] = useHistoryFilter();
   const { data: person } = useQuery(sessionQuery);
   const { data: page, error, isPending } = useQuery(historyQuery(filter));
-  const { data: keys = [] } = useQuery({ ...keysQuery, enabled: person !== undefined && person.role !== 'reviewer' });
+  const { data: keys = [] } = useQuery({ ...keysQuery, enabled: person != null && person.role !== 'reviewer' });
   const [opened, setOpened] = useState<HistoryEntry | null>(null);
   return (
     <>

@@ -17,7 +17,7 @@ const NO_FILTER = { key: '', route: '', from: '', to: '', cursor: '' };
 export function Component() {
   const { data: person } = useQuery(sessionQuery);
   const refused = useQuery(historyQuery({ ...NO_FILTER, status: '4xx' }, 8));
-  const { data: keys = [] } = useQuery({ ...keysQuery, enabled: person !== undefined && person.role !== 'reviewer' });
+  const { data: keys = [] } = useQuery({ ...keysQuery, enabled: person != null && person.role !== 'reviewer' });
   const [opened, setOpened] = useState<HistoryEntry | null>(null);
   const [now] = useState(Date.now);
   const expiring = keys.filter(({ expiresAt, revokedAt }) => revokedAt === null && expiresAt !== null && Date.parse(expiresAt) > now && Date.parse(expiresAt) - now < SOON);

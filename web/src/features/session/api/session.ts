@@ -6,9 +6,10 @@ export type Person = components['schemas']['Person'];
 export type Role = Person['role'];
 export type SignInInput = components['schemas']['SignInInput'];
 
+/** Who is signed in; null for nobody. */
 export const sessionQuery = queryOptions({
   queryKey: ['session'],
-  queryFn: async ({ signal }): Promise<Person> => (await dataOf(client.GET('/sessions/current', { signal }))).person,
+  queryFn: async ({ signal }): Promise<Person | null> => (await dataOf(client.GET('/sessions/current', { signal }))).person,
   staleTime: 60_000,
 });
 
