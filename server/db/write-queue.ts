@@ -32,7 +32,8 @@ export class WriteQueue<Row> {
   readonly #bound: number;
   #rows: Waiting<Row>[] = [];
   #work: (() => Promise<void>)[] = [];
-  #busy: Promise<void> | null = null;
+  #draining = false;
+  #drained: Promise<void> = Promise.resolve();
   #closed = false;
 
   constructor(sequelize: Sequelize, store: StoreRows<Row>, bound = 10_000) {
@@ -69,7 +70,7 @@ export class WriteQueue<Row> {
   /** Refuses what comes from now on and resolves when everything that waited is committed. */
   async close(): Promise<void> {
     this.#closed = true;
-    await this.#busy;
+    await this.#drained;
   }
 
   #refusal(): Error | null {
@@ -79,9 +80,9 @@ export class WriteQueue<Row> {
   }
 
   #start(): void {
-    this.#busy ??= this.#drain().finally(() => {
-      this.#busy = null;
-    });
+    if (this.#draining) return;
+    this.#draining = true;
+    this.#drained = this.#drain();
   }
 
   async #drain(): Promise<void> {
@@ -89,6 +90,8 @@ export class WriteQueue<Row> {
       await this.#commitRows();
       await this.#work.shift()?.();
     }
+    // In the same step as the last look at the queue: whatever comes later starts a drain of its own.
+    this.#draining = false;
   }
 
   async #commitRows(): Promise<void> {

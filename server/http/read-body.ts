@@ -22,12 +22,11 @@ export async function readJson(request: Request, response: Response): Promise<un
     const seen = type === undefined ? 'The request has no content type' : `The content type is "${type}"`;
     throw new HttpProblem('unsupported-media-type', `${seen}; this operation takes application/json.`, [], { Accept: 'application/json' });
   }
+  if (request.headers['transfer-encoding'] === undefined && Number(request.headers['content-length'] ?? 0) === 0) throw new HttpProblem('malformed-json', 'The body is empty.');
   await new Promise<void>((resolve, reject) => {
     parseJson(request, response, (error?: unknown) => (error ? reject(asProblem(error)) : resolve()));
   });
-  const body: unknown = request.body;
-  if (body === undefined) throw new HttpProblem('malformed-json', 'The body is empty.');
-  return body;
+  return request.body as unknown;
 }
 
 /** What the body parser says, by its documented `type`. */

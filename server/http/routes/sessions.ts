@@ -8,7 +8,7 @@ export function sessionRoutes(services: Services, router: Router): void {
   const { cookie } = services;
   mount(services, router, signInEndpoint)(async ({ body, call }) => {
     const { person, token, expiresAt } = await signIn(services, body, call.request.headers['user-agent'] ?? 'unknown');
-    call.response.cookie(cookie.name, token, { ...cookie.options, expires: new Date(expiresAt) });
+    call.response.cookie(cookie.name, token, { ...cookie.options, maxAge: expiresAt - services.clock() });
     return { person };
   });
   mount(services, router, currentSessionEndpoint)(({ call }) => ({ person: call.person }));

@@ -21,7 +21,7 @@ export function Component() {
       <PageHeading title="Workbench" action={<Button disabled={refused} onClick={() => { if (!refused) change({ from: to, to: from, numbers: result.numbers.map(String) }); }}>Turn round</Button>}>
         Numbers in one convention, the same attitude in another: computed here by the core that the service runs. The address holds everything you see.
       </PageHeading>
-      <div className="grid gap-6 lg:grid-cols-2 xl:grid-cols-[1fr_1fr_1.1fr]">
+      <div className="grid items-start gap-6 lg:grid-cols-2 xl:grid-cols-[1fr_1fr_1.1fr]">
         <div className="space-y-4">
           <ConventionEditor legend="From" statement={from} onChange={(statement) => change({ from: statement })} />
           <NumbersEditor convention={from.convention} numbers={numbers} bad={refused ? result.bad : []} onChange={(next) => change({ numbers: next })} />
