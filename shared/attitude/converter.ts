@@ -65,6 +65,8 @@ export function createConverter(from: Convention, to: Convention, options: Conve
       }
     }
     faults.throwIfAny(count);
+    // Nobody means −0: it would be written as 0 in JSON and differ from itself elsewhere.
+    for (let k = 0; k < count * outputWidth; k++) out[k]! += 0;
     converted += count;
     return out;
   }

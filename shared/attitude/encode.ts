@@ -37,9 +37,17 @@ export function encoderOf(convention: Convention): Encoder {
         const locked = cosine <= lockAt;
         // At lock one angle is free: it is the last one applied, which for extrinsic motion is the first intrinsic one.
         const applied = extrinsic ? (locked ? swapAtLock(turns.symmetric, turns.parity, angles) : [angles[2], angles[1], angles[0]]) : angles;
+        if (turns.symmetric && signs[1] < 0) {
+          // The listed middle number lies in [0, half], so the angle lies in [−half, 0]: the other solution of the pair.
+          applied[1] = -applied[1]!;
+          if (!locked) {
+            applied[0]! += half;
+            applied[2]! += half;
+          }
+        }
         for (let i = 0; i < 3; i++) {
           const turn = order[i]! - 1;
-          const listed = signs[turn]! * wrap(applied[turn]!, half, signs[turn]!);
+          const listed = turn === 1 ? signs[1] * applied[1]! : signs[turn]! * wrap(applied[turn]!, half, signs[turn]!);
           out[at + i] = turn === 0 && range === 'positive' && listed < 0 ? listed + 2 * half : listed;
           if (out[at + i] === 2 * half && turn === 0 && range === 'positive') out[at + i] = 0;
         }

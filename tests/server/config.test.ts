@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest';
-import { ConfigError, readConfig } from '#server/config.ts';
+import type { ConfigError} from '#server/config.ts';
+import { readConfig } from '#server/config.ts';
 
 const problemsOf = (environment: Record<string, string>, demo = false): readonly string[] => {
   try {
