@@ -6,7 +6,7 @@ export default defineConfig({
       {
         test: {
           name: 'unit',
-          include: ['tests/shared/**/*.test.ts', 'tests/reference/**/*.test.ts', 'tests/web/**/*.test.ts', 'tests/examples/**/*.test.ts'],
+          include: ['tests/shared/**/*.test.ts', 'tests/reference/**/*.test.ts', 'tests/web/**/*.test.ts', 'tests/scenario/**/*.test.ts'],
           environment: 'node',
         },
       },
