@@ -3,13 +3,15 @@ import type { Express } from 'express';
 import swaggerUi from 'swagger-ui-express';
 import { projectFile } from '../project-file.ts';
 
-const PAGE_STYLES = `
-html { box-sizing: border-box; overflow-y: scroll; }
-*, *::before, *::after { box-sizing: inherit; }
-body { margin: 0; background: #f7f3e8; }
-.swagger-ui .topbar { display: none; }
-body > svg { position: absolute; width: 0; height: 0; }
-`;
+/** The packaged layout with the bar on top brings a style block of its own, which the content security policy refuses. */
+const OPTIONS = {
+  swaggerUrl: '/openapi.yaml',
+  customSiteTitle: 'Dextral API reference',
+  customCssUrl: '/reference.css',
+  customJs: '/theme.js',
+  customfavIcon: '/mark.svg',
+  swaggerOptions: { layout: 'BaseLayout', tryItOutEnabled: true, defaultModelsExpandDepth: 0, validatorUrl: null, syntaxHighlight: { activated: false } },
+};
 
 /** The contract as a file and as pages where a call can be tried with a key. */
 export function mountDocumentation(app: Express): void {
@@ -18,15 +20,8 @@ export function mountDocumentation(app: Express): void {
     response.type('application/yaml').set('Cache-Control', 'no-cache').send(contract);
   });
 
-  // The packaged page has style blocks of its own, which the content security policy refuses: they are taken out
-  // and served as a file.
-  const page = swaggerUi
-    .generateHTML(undefined, { swaggerUrl: '/openapi.yaml', customSiteTitle: 'Dextral API reference', customCssUrl: '/docs/page.css', swaggerOptions: { tryItOutEnabled: true, defaultModelsExpandDepth: 0, validatorUrl: null, syntaxHighlight: { activated: false } } })
-    .replaceAll(/<style>[\s\S]*?<\/style>/g, '')
-    .replaceAll(/ style="[^"]*"/g, '');
-  app.get('/docs/page.css', (_request, response) => {
-    response.type('text/css').send(PAGE_STYLES);
-  });
+  // The packaged page has style blocks of its own, which the policy refuses too: reference.css says the same and more.
+  const page = swaggerUi.generateHTML(undefined, OPTIONS).replaceAll(/<style>[\s\S]*?<\/style>/g, '').replaceAll(/ style="[^"]*"/g, '');
   app.get('/docs', (request, response, next) => {
     if (request.originalUrl.split('?')[0] === '/docs') return void response.redirect(308, '/docs/');
     next();
@@ -34,5 +29,5 @@ export function mountDocumentation(app: Express): void {
   app.get('/docs/', (_request, response) => {
     response.type('text/html').send(page);
   });
-  app.use('/docs', ...swaggerUi.serveFiles(undefined, { swaggerUrl: '/openapi.yaml', swaggerOptions: { tryItOutEnabled: true, defaultModelsExpandDepth: 0, validatorUrl: null, syntaxHighlight: { activated: false } } }));
+  app.use('/docs', ...swaggerUi.serveFiles(undefined, OPTIONS));
 }

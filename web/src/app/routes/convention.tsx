@@ -32,7 +32,7 @@ export function Component() {
             <ol className="figures grid grid-cols-1 gap-x-6 border-t border-hair">
               {preset.worked.numbers.map((number, i) => <li key={i} className="border-b border-hair py-1">{number}</li>)}
             </ol>
-            <p className="mt-3"><Link to={`/workbench?from=${encodeURIComponent(preset.id)}&numbers=${preset.worked.numbers.join(',')}`}>Open it in the workbench</Link></p>
+            <p className="mt-3"><Link to={`/workbench?from=${encodeURIComponent(preset.id)}${preset.worked.numbers.map((number) => `&n=${number}`).join('')}`}>Open it in the workbench</Link></p>
           </div>
           <div>
             <h2 className="mb-2 text-lg font-semibold">Where it comes from</h2>

@@ -19,17 +19,17 @@ export interface WorkbenchState {
 
 export const statementOf = (id: string): Statement => ({ preset: id, convention: PRESETS.find((preset) => preset.id === id)!.convention });
 
-/** The state in the address: `from` and `to` as preset ids or JSON facets, `numbers` joined by commas. */
+/** The state in the address: `from` and `to` as preset ids or JSON facets, one `n` a number, as typed. */
 export function useWorkbenchState(): readonly [WorkbenchState, (change: Partial<WorkbenchState>) => void] {
   const [search, setSearch] = useSearchParams();
   const from = readStatement(search.get('from')) ?? statementOf('aircraft-euler-deg');
   const to = readStatement(search.get('to')) ?? statementOf('aircraft-quaternion');
-  const given = search.get('numbers')?.split(',') ?? ['30', '10', '20'];
+  const given = search.has('n') ? search.getAll('n') : ['30', '10', '20'];
   const width = NUMBERS_PER_ATTITUDE[from.convention.representation];
   const state = { from, to, numbers: Array.from({ length: width }, (_, i) => given[i] ?? '') };
   function change(part: Partial<WorkbenchState>) {
     const next = { ...state, ...part };
-    setSearch({ from: writeStatement(next.from), to: writeStatement(next.to), numbers: next.numbers.join(',') }, { replace: true });
+    setSearch([['from', writeStatement(next.from)], ['to', writeStatement(next.to)], ...next.numbers.map((number): [string, string] => ['n', number])], { replace: true });
   }
   return [state, change];
 }
