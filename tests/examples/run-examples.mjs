@@ -39,6 +39,14 @@ try {
 
   const refused = run('bash', ['examples/convert-recording.sh', at('flight.csv'), at('none.csv')], { DEXTRAL_URL: demo.url, DEXTRAL_KEY: 'wrong' });
   check('the shell script stops at a refusal and shows it', refused.status === 1 && refused.stderr.includes('invalid-key'), refused.stderr);
+  // Source: Gleason & Gebre-Egziabher, GNSS Applications and Methods (Artech House 2009), ch. 7, eul2Cbn: six digits.
+  const published = [0.121771, -0.991747, -0.040132, 0.968207, 0.109785, 0.22477, -0.218509, -0.066226, 0.973585];
+  const command = /## A first call[\s\S]*?```sh\n([\s\S]*?)```/.exec(readFileSync(path.join(root, 'README.md'), 'utf8'))[1]
+    .replaceAll('http://127.0.0.1:8787', demo.url).replaceAll('data/demo.json', path.join(demo.dataDirectory, 'demo.json'));
+  const firstCall = run('bash', ['-c', command]);
+  const answer = JSON.parse(firstCall.stdout);
+  check("the README's first call answers the published matrix to its six digits", answer.attitudes[0].every((element, i) => Math.abs(element - published[i]) <= 0.5e-6), firstCall.stdout);
+  check('and says it in a sentence', answer.readings[0] === 'nose 277.0° true, 2.3° up, right wing 13.0° down', answer.readings);
 } catch (error) {
   check('the examples run', false, error);
 } finally {
