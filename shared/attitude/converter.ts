@@ -1,8 +1,11 @@
-import { NUMBERS_PER_ATTITUDE, type Convention } from './convention.ts';
-import { decoderOf, isRefusal, type Decoded } from './decode.ts';
-import { encoderOf } from './encode.ts';
+import { scratch } from './arithmetic/scratch.ts';
+import { COSINE, DEFECT } from './arithmetic/slots.ts';
+import { NUMBERS_PER_ATTITUDE, type Convention, type EulerConvention } from './convention.ts';
 import { AttitudeError, LISTED_AT_MOST, type AttitudeErrorCode, type AttitudeFault } from './errors.ts';
-import { relabelMatrix, relabelQuaternion, relabellingBetween, relabellingQuaternions } from './relabelling.ts';
+import { LOCKED, NOT_REPRESENTABLE, REFUSED, REPAIRED } from './kernels/status.ts';
+import { pipelineBetween } from './pipeline.ts';
+import { refusalOf } from './refusal.ts';
+import { determinantOf } from './relabelling.ts';
 import { WarningTally } from './warning-tally.ts';
 import type { AttitudeWarning } from './warnings.ts';
 
@@ -34,13 +37,15 @@ export interface Converter {
 
 /** @throws AttitudeError `unrelated-frames`, `improper-axes`, `invalid-convention`. */
 export function createConverter(from: Convention, to: Convention, options: ConverterOptions = {}): Converter {
-  const relabelling = relabellingBetween(from, to);
-  const quaternions = relabellingQuaternions(relabelling);
-  const decode = decoderOf(from, options.repair ?? 'none');
-  const encode = encoderOf(to);
+  refuseImproper(from);
+  refuseImproper(to);
+  const { read, write } = pipelineBetween(from, to, options.repair ?? 'none');
   const tally = new WarningTally(options.warnWithinDeg ?? 1);
   const inputWidth = NUMBERS_PER_ATTITUDE[from.representation];
   const outputWidth = NUMBERS_PER_ATTITUDE[to.representation];
+  const repairCode = from.representation === 'dcm' ? 'reorthonormalised' : 'renormalised';
+  // Every cosine below this may be worth a warning; the tally decides.
+  const cosineToReport = to.representation === 'euler' ? Math.min(1, (options.warnWithinDeg ?? 1) / 57) + 1e-6 : 0;
   let converted = 0;
 
   function convert(input: Float64Array, output?: Float64Array): Float64Array {
@@ -49,36 +54,35 @@ export function createConverter(from: Convention, to: Convention, options: Conve
     const out = output ?? new Float64Array(count * outputWidth);
     const faults = new Faults();
     for (let i = 0; i < count; i++) {
-      const decoded = decode(input, i * inputWidth);
-      if (isRefusal(decoded)) {
-        faults.add(decoded.code, { index: converted + i, message: decoded.message, ...(decoded.component === undefined ? {} : { component: decoded.component }), ...(decoded.defect === undefined ? {} : { defect: decoded.defect }) });
+      const status = read(input, i * inputWidth);
+      if (status === REFUSED) {
+        const { code, ...fault } = refusalOf(from, input.slice(i * inputWidth, (i + 1) * inputWidth));
+        faults.add(code, { index: converted + i, ...fault });
         continue;
       }
-      const encoded = encode(relabelled(decoded), out, i * outputWidth);
-      if (encoded.notRepresentable) faults.add('not-representable', { index: converted + i, message: 'is a half turn, for which no Gibbs vector exists' });
-      if (decoded.defect !== undefined) tally.repaired(converted + i, from.representation === 'dcm' ? 'reorthonormalised' : 'renormalised', decoded.defect);
-      if (to.representation === 'euler' && encoded.cosine !== undefined) {
-        const at = i * outputWidth;
-        const listed: [number, number, number] = [out[at]!, out[at + 1]!, out[at + 2]!];
-        const middle = listed[to.order.indexOf(2)]! * to.signs[1];
-        tally.lock(converted + i, encoded.cosine, encoded.locked ?? false, to, listed, middle);
-      }
+      if (status === REPAIRED) tally.repaired(converted + i, repairCode, scratch[DEFECT]!);
+      const written = write(out, i * outputWidth);
+      if (written === NOT_REPRESENTABLE) faults.add('not-representable', { index: converted + i, message: 'is a half turn, for which no Gibbs vector exists' });
+      else if (scratch[COSINE]! < cosineToReport && to.representation === 'euler') reportLock(i, written === LOCKED, to, out);
     }
     faults.throwIfAny(count);
-    // Nobody means −0: it would be written as 0 in JSON and differ from itself elsewhere.
-    for (let k = 0; k < count * outputWidth; k++) out[k]! += 0;
     converted += count;
     return out;
   }
 
-  function relabelled({ quaternion, matrix }: Decoded) {
-    // Angles decode to both: a matrix keeps their exact zeros and ones, a quaternion their small rotations.
-    const takesMatrix = to.representation === 'dcm' || to.representation === 'euler';
-    if (matrix && (takesMatrix || !quaternion)) return { matrix: relabelMatrix(relabelling, matrix) };
-    return { quaternion: relabelQuaternion(quaternions!, quaternion!) };
+  function reportLock(i: number, locked: boolean, convention: EulerConvention, out: Float64Array): void {
+    const at = i * outputWidth;
+    const listed: [number, number, number] = [out[at]!, out[at + 1]!, out[at + 2]!];
+    const middle = listed[convention.order.indexOf(2)]! * convention.signs[1];
+    tally.lock(converted + i, scratch[COSINE]!, locked, convention, listed, middle);
   }
 
   return { from, to, inputWidth, outputWidth, convert, warnings: () => tally.warnings() };
+}
+
+function refuseImproper(convention: Convention): void {
+  if (convention.representation === 'dcm' || determinantOf(convention) > 0) return;
+  throw new AttitudeError('improper-axes', `${convention.reference} and ${convention.body} differ in handedness: their component matrix has determinant −1, which the representation "${convention.representation}" cannot express. Use "dcm", or two sets of the same handedness.`);
 }
 
 /** What is wrong with a batch: the first kind of fault names the error, every attitude at fault is counted. */
