@@ -42,15 +42,11 @@ export function simulateFlight({ rateHz = 50, seed = 4711 }: FlightOptions = {})
   const samples: FlightSample[] = [];
   const first = FLIGHT_PLAN[0]!;
   const state: State = { q: fromAngles(first.heading ?? 0, 0, 0), rates: [0, 0, 0], position: [0, 0, 0], airspeed: 0, gust: [0, 0, 0] };
-  let time = 0;
   for (const leg of FLIGHT_PLAN) {
     const count = Math.round(leg.seconds * rateHz);
     for (let i = 0; i < count; i++) {
       samples.push({ time: samples.length / rateHz, quaternion: [...state.q], rates: [...state.rates], position: [...state.position], airspeed: state.airspeed });
-      for (let n = 0; n < STEPS; n++) {
-        advance(state, leg, step, random);
-        time += step;
-      }
+      for (let n = 0; n < STEPS; n++) advance(state, leg, step, random);
     }
   }
   return samples;

@@ -21,7 +21,7 @@ describe.each(['light', 'dark'] as const)('in the %s theme', (colorScheme) => {
     for (const path of PAGES) {
       await page.goto(demo.url + path);
       await page.getByRole('heading', { level: 1 }).waitFor();
-      await page.waitForLoadState('networkidle');
+      await page.locator('[role=status][aria-label^="Fetching"]').first().waitFor({ state: 'detached' });
       await inspect(path);
     }
     expectQuiet();

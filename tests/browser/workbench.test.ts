@@ -12,6 +12,7 @@ it('converts as the service does, keeps its state in the address, and its curl r
   const { page, expectQuiet } = await openPage(browser);
   await signIn(page, 'engineer');
   await page.goto(`${demo.url}/workbench?from=aircraft-euler-rpy-deg&to=aircraft-dcm&n=12&n=-34&n=56`);
+  await page.getByRole('region', { name: 'Result' }).waitFor();
   const shown = await page.getByRole('region', { name: 'Result' }).locator('dd').allTextContents();
 
   const curl = (await page.locator('figure', { hasText: 'curl' }).locator('pre').textContent())!;
