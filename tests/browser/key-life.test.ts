@@ -35,7 +35,7 @@ it('an administrator issues a key, calls with it, finds the call, revokes it, an
   await page.getByRole('link', { name: 'History' }).first().click();
   await page.getByLabel('Key', { exact: true }).selectOption({ label: 'Release pipeline' });
   const row = page.getByRole('row', { name: new RegExp(requestId.slice(0, 8)) });
-  await row.waitFor();
+  await page.getByRole('row').nth(2).waitFor({ state: 'detached' });
   expect(await page.getByRole('row').count()).toBe(2);
   await row.getByRole('button', { name: `Open the record of ${requestId}` }).click();
   const record = page.getByRole('dialog', { name: 'Record of a call' });
