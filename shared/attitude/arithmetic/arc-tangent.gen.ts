@@ -1,6 +1,6 @@
 // Written by shared/generator/write.ts from shared/generator/kernels/arc-tangent.ts. Do not edit.
 import { ARCS_DEGREES, ARCS_RADIANS, SENSE } from './arc-table.ts';
-import { scratch as S } from './scratch.ts';
+import { scratch } from './scratch.ts';
 
 /**
  * The angle of (x, y) in radians, in double-double: in (−π, π], with atan2(0, x < 0) = +π.
@@ -12,6 +12,7 @@ import { scratch as S } from './scratch.ts';
  * Method: quotient reduced by a table of atan(k/256), short series.
  */
 export function arcTangentRadians(at: number, to: number): void {
+  const S = scratch;
   const T = ARCS_RADIANS;
   const yh = S[at]!;
   const xh = S[at + 2]!;
@@ -186,6 +187,7 @@ export function arcTangentRadians(at: number, to: number): void {
  * Method: quotient reduced by a table of atan(k/256), short series.
  */
 export function arcTangentDegrees(at: number, to: number): void {
+  const S = scratch;
   const T = ARCS_DEGREES;
   const yh = S[at]!;
   const xh = S[at + 2]!;

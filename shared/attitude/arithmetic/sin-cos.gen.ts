@@ -1,7 +1,7 @@
 // Written by shared/generator/write.ts from shared/generator/kernels/sin-cos.ts. Do not edit.
 import { reduceLargeAngle, REDUCED } from './large-angle.ts';
-import { scratch as S } from './scratch.ts';
-import { SIGN_OF_COSINE, SIGN_OF_SINE, SINES_AND_COSINES as T } from './sine-table.ts';
+import { scratch } from './scratch.ts';
+import { SIGN_OF_COSINE, SIGN_OF_SINE, SINES_AND_COSINES } from './sine-table.ts';
 import { STEP_PARTS } from './tables.gen.ts';
 
 const [STEP_1, STEP_2, STEP_3, STEP_4] = STEP_PARTS;
@@ -20,6 +20,8 @@ const ROUNDER = 6755399441055744;
  *   reduction is done in integers.
  */
 export function sinCosRadians(at: number, to: number): void {
+  const S = scratch;
+  const T = SINES_AND_COSINES;
   const x = S[at]!;
   const low = S[at + 1]!;
   let k: number;
@@ -258,6 +260,8 @@ export function sinCosRadians(at: number, to: number): void {
  * Accuracy: as sinCosRadians. The reduction is exact, since the table step of 15/128° is a double.
  */
 export function sinCosDegrees(at: number, to: number): void {
+  const S = scratch;
+  const T = SINES_AND_COSINES;
   let x = S[at]!;
   const low = S[at + 1]!;
   if (!(x < 1099511627776 && x > -1099511627776)) x %= 360;

@@ -1,11 +1,12 @@
 // Written by shared/generator/write.ts from shared/generator/kernels/euler.ts. Do not edit.
-import { scratch as S } from '../arithmetic/scratch.ts';
+import { scratch } from '../arithmetic/scratch.ts';
 
 /**
  * The quaternion of intrinsic angles about three different axes, R = Rx(a) Ry(b) Rz(c).
  * Reads SINES_COSINES of the half angles; leaves QUATERNION, of norm 1 to 2^-97.
  */
 export function quaternionOfThree(): void {
+  const S = scratch;
   const t0 = S[8]!;
   const t1 = S[9]!;
   const t2 = S[10]!;
@@ -297,6 +298,7 @@ export function quaternionOfThree(): void {
  * Reads SINES_COSINES of the half angles; leaves QUATERNION, of norm 1 to 2^-97.
  */
 export function quaternionOfSame(): void {
+  const S = scratch;
   const t0 = S[8]!;
   const t1 = S[9]!;
   const t2 = S[10]!;
@@ -588,6 +590,7 @@ export function quaternionOfSame(): void {
  * Reads SINES_COSINES; leaves MATRIX. A zero element comes out exact where a factor is zero.
  */
 export function matrixOfThree(): void {
+  const S = scratch;
   const t0 = S[8]!;
   const t1 = S[9]!;
   const t2 = S[10]!;
@@ -941,6 +944,7 @@ export function matrixOfThree(): void {
  * Reads SINES_COSINES; leaves MATRIX. A zero element comes out exact where a factor is zero.
  */
 export function matrixOfSame(): void {
+  const S = scratch;
   const t0 = S[8]!;
   const t1 = S[9]!;
   const t2 = S[10]!;
@@ -1297,6 +1301,7 @@ export function matrixOfSame(): void {
  * Source: Bernardes & Viollet 2022, doi:10.1371/journal.pone.0276302.
  */
 export function anglesOfQuaternionThree(): void {
+  const S = scratch;
   const t0 = S[24]!;
   const t1 = S[25]!;
   const t2 = S[26]!;
@@ -1759,6 +1764,7 @@ export function anglesOfQuaternionThree(): void {
  * Source: Bernardes & Viollet 2022, doi:10.1371/journal.pone.0276302.
  */
 export function anglesOfQuaternionSame(): void {
+  const S = scratch;
   const t0 = S[24]!;
   const t1 = S[25]!;
   const t2 = S[26]!;
@@ -2122,6 +2128,7 @@ export function anglesOfQuaternionSame(): void {
  * The last angle is that of the matrix turned back by the first, so their well-conditioned combination holds near lock.
  */
 export function anglesOfMatrixThree(): void {
+  const S = scratch;
   const t0 = S[42]!;
   const t1 = S[43]!;
   const t2 = -t0;
@@ -2360,6 +2367,7 @@ export function anglesOfMatrixThree(): void {
  * Reads MATRIX; leaves POINTS a, b, c, COSINE |sin b|, LOCKED_FIRST and LOCKED_LAST: the points of the angle left at lock, where the first or the last intrinsic angle carries all.
  */
 export function anglesOfMatrixSame(): void {
+  const S = scratch;
   const t0 = S[38]!;
   const t1 = S[39]!;
   const t2 = S[44]!;

@@ -1,10 +1,11 @@
 // Written by shared/generator/write.ts from shared/generator/kernels/rotation.ts. Do not edit.
-import { scratch as S } from '../arithmetic/scratch.ts';
+import { scratch } from '../arithmetic/scratch.ts';
 
 /**
  * R(q) / |q|². Reads QUATERNION, of any norm near 1; leaves MATRIX.
  */
 export function matrixOfQuaternion(): void {
+  const S = scratch;
   const t0 = S[24]!;
   const t1 = S[25]!;
   const t2 = S[26]!;
@@ -539,6 +540,7 @@ export function matrixOfQuaternion(): void {
  * q / |q|. Reads and leaves QUATERNION.
  */
 export function normaliseQuaternion(): void {
+  const S = scratch;
   const t0 = S[24]!;
   const t1 = S[25]!;
   const t2 = S[26]!;
@@ -760,6 +762,7 @@ export function normaliseQuaternion(): void {
  * Source: Bar-Itzhack 2000, J. Guidance, Control and Dynamics 23(6), "New method for extracting the quaternion from a rotation matrix".
  */
 export function nearestQuaternion(): void {
+  const S = scratch;
   const t0 = S[92]!;
   const t1 = S[93]!;
   const t2 = S[94]!;
@@ -1231,6 +1234,7 @@ export function nearestQuaternion(): void {
  * |v|. Reads VECTOR; leaves LENGTH.
  */
 export function lengthOfVector(): void {
+  const S = scratch;
   const t0 = S[84]!;
   const t1 = S[85]!;
   const t2 = S[86]!;
@@ -1317,6 +1321,7 @@ export function lengthOfVector(): void {
  * q = (c, s v/|v|). Reads VECTOR, LENGTH and the first of SINES_COSINES (of the half angle); leaves QUATERNION.
  */
 export function quaternionAboutVector(): void {
+  const S = scratch;
   const t0 = S[8]!;
   const t1 = S[9]!;
   const t2 = S[10]!;
@@ -1433,6 +1438,7 @@ export function quaternionAboutVector(): void {
  * q = (1 − |p|², 2 p), scaled. Reads VECTOR (t p) and the first of SEED (t, a power of two); leaves QUATERNION.
  */
 export function quaternionOfMrp(): void {
+  const S = scratch;
   const t0 = S[84]!;
   const t1 = S[85]!;
   const t2 = S[86]!;
@@ -1580,6 +1586,7 @@ export function quaternionOfMrp(): void {
  * Reads QUATERNION with w ≥ 0; leaves LENGTH |v| and the first of POINTS (|v|, w), whose angle is half the rotation's.
  */
 export function lengthOfVectorPart(): void {
+  const S = scratch;
   const t0 = S[24]!;
   const t1 = S[25]!;
   const t2 = S[26]!;
@@ -1684,6 +1691,7 @@ export function lengthOfVectorPart(): void {
  * v 2a/|v|. Reads QUATERNION, LENGTH and the half angle a as the pair at POINTS; leaves three pairs at POINTS.
  */
 export function rotationVectorOfAngle(): void {
+  const S = scratch;
   const t0 = S[26]!;
   const t1 = S[27]!;
   const t2 = S[28]!;
@@ -1801,6 +1809,7 @@ export function rotationVectorOfAngle(): void {
  * v/|v|. Reads QUATERNION and LENGTH; leaves three pairs at POINTS + 4.
  */
 export function axisOfVectorPart(): void {
+  const S = scratch;
   const t0 = S[26]!;
   const t1 = S[27]!;
   const t2 = S[28]!;
@@ -1913,6 +1922,7 @@ export function axisOfVectorPart(): void {
  * v/(|q| + w). Reads QUATERNION with w ≥ 0; leaves three pairs at POINTS.
  */
 export function mrpOfQuaternion(): void {
+  const S = scratch;
   const t0 = S[24]!;
   const t1 = S[25]!;
   const t2 = S[26]!;
@@ -2122,6 +2132,7 @@ export function mrpOfQuaternion(): void {
  * v/w. Reads QUATERNION with w > 0; leaves three pairs at POINTS.
  */
 export function gibbsOfQuaternion(): void {
+  const S = scratch;
   const t0 = S[24]!;
   const t1 = S[25]!;
   const t2 = S[26]!;

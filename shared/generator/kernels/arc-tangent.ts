@@ -78,16 +78,18 @@ const describe = (unit: string): string => `/**
 export function arcTangentSource(): string {
   return `// Written by shared/generator/write.ts from shared/generator/kernels/arc-tangent.ts. Do not edit.
 import { ARCS_DEGREES, ARCS_RADIANS, SENSE } from './arc-table.ts';
-import { scratch as S } from './scratch.ts';
+import { scratch } from './scratch.ts';
 
 ${describe('radians')}
 export function arcTangentRadians(at: number, to: number): void {
+  const S = scratch;
   const T = ARCS_RADIANS;
 ${PROLOGUE}${body('rad')}
 }
 
 ${describe('degrees; exact at multiples of 45°')}
 export function arcTangentDegrees(at: number, to: number): void {
+  const S = scratch;
   const T = ARCS_DEGREES;
 ${PROLOGUE}${body('deg')}
 }

@@ -12,10 +12,10 @@ export function kernelFile(source: string, kernels: readonly Kernel[]): string {
     const b = new StraightLine();
     body(b);
     const comment = doc.trim().split('\n').map((line) => ` * ${line.trim()}`.trimEnd()).join('\n');
-    return `/**\n${comment}\n */\nexport function ${name}(): void {\n${b.text()}\n}\n`;
+    return `/**\n${comment}\n */\nexport function ${name}(): void {\n  const S = scratch;\n${b.text()}\n}\n`;
   });
   return `// Written by shared/generator/write.ts from shared/generator/kernels/${source}. Do not edit.
-import { scratch as S } from '../arithmetic/scratch.ts';
+import { scratch } from '../arithmetic/scratch.ts';
 
 ${functions.join('\n')}`;
 }
