@@ -1,4 +1,10 @@
+import { createConverter } from '#shared/attitude/converter.ts';
+import { AttitudeError } from '#shared/attitude/errors.ts';
+import { ATTITUDES_PER_CALL } from '#shared/api/limits.ts';
+import { DAY, DAYS, HOUR, isWeekend, pastBuilds, type Build } from './builds.ts';
+import type { Fault, Pipeline } from './pipelines.ts';
 import { SeededRandom } from './random.ts';
+import { RecordedLegs } from './recorded-legs.ts';
 
 /** One past API call of the scenario, as plain values. */
 export interface PastCall {
@@ -15,74 +21,106 @@ export interface PastCall {
   readonly warningCodes: readonly string[];
 }
 
-const DAY = 86_400_000;
-const CONVERT = '/api/v1/convert';
+type Outcome = Pick<PastCall, 'status' | 'code' | 'attitudes' | 'warnings' | 'warningCodes'>;
 
-/** What a pipeline sends, and how often things go wrong in it. */
-interface Pipeline {
-  readonly key: string;
-  readonly callsADay: number;
-  readonly batch: readonly [number, number];
-  /** Hour of day (UTC) at which its calls gather. */
-  readonly hour: number;
-  readonly spread: number;
-  readonly weekends: boolean;
-  readonly from: number;
-  readonly until: number;
-}
+const CONVERT = { method: 'POST', route: '/api/v1/convert' } as const;
+const refused = (status: number, code: string): Outcome => ({ status, code, attitudes: 0, warnings: 0, warningCodes: [] });
+const answered = (attitudes: number): Outcome => ({ status: 200, code: null, attitudes, warnings: 0, warningCodes: [] });
 
-const PIPELINES: readonly Pipeline[] = [
-  { key: 'Autopilot pipeline', callsADay: 40, batch: [200, 2000], hour: 13, spread: 3, weekends: false, from: 44, until: 0 },
-  { key: 'Integration rig', callsADay: 22, batch: [500, 5000], hour: 10, spread: 2.5, weekends: false, from: 43, until: 0 },
-  { key: 'Gimbal pipeline', callsADay: 18, batch: [50, 800], hour: 15, spread: 2, weekends: false, from: 40, until: 0 },
-  { key: 'Simulator nightly', callsADay: 12, batch: [8000, 10_000], hour: 2, spread: 0.6, weekends: true, from: 38, until: 0 },
-  { key: 'Bench laptop', callsADay: 6, batch: [1, 12], hour: 14, spread: 3, weekends: false, from: 41, until: 15 },
-];
+/** When the simulator's nightly job was started once per leg by mistake, in days ago. */
+const LOOPING_NIGHT = 9;
+/** When the laptop's key was revoked, and when its owner noticed. */
+const LAPTOP = { key: 'Bench laptop', since: 41, revoked: 17, noticed: 15 } as const;
 
 /**
- * About six weeks of calls that end at `now`, oldest first: a working-day rhythm, runs that pass near gimbal lock on
- * the days of the pull-up exercise, a week in which the gimbal's supplier sent its scalar last as first so that the
- * pipeline's norm checks refused it, a laptop that went on with a revoked key, and the odd mistake.
+ * About six weeks of calls that end at `now`, oldest first: builds in a working-day rhythm that convert the legs of the
+ * flight, the mistakes of `pipelines.ts`, a night that ran into the limit, a laptop that went on with a revoked key, and
+ * slips of the hand. What a conversion answered, warned of or refused is computed by really converting; only durations
+ * and slips are drawn.
  */
-export function pastCalls(now: number): PastCall[] {
-  const random = new SeededRandom(20_260_119);
+export function pastCalls(now: number, flight = new RecordedLegs()): PastCall[] {
+  const conversions = new Conversions(flight);
+  const calls = [...pastBuilds(now).flatMap((build) => callsOf(build, conversions)), ...callsByHand(now)];
+  return calls.filter(({ at }) => at < now).sort((a, b) => a.at - b.at);
+}
+
+function callsOf({ pipeline, at, daysAgo, fault, seed }: Build, conversions: Conversions): PastCall[] {
+  const random = new SeededRandom(seed);
+  const { key } = pipeline;
+  const calls: PastCall[] = [];
+  let clock = at;
+  const call = (outcome: Outcome, what: { method: string; route: string } = CONVERT): void => {
+    const durationUs = Math.round(random.between(700, 1500) + outcome.attitudes * random.between(1.3, 2.3));
+    calls.push({ at: Math.round(clock), key, ...what, durationUs, ...outcome });
+    clock += durationUs / 1000 + random.between(20, 900);
+  };
+  if (random.chance(0.35)) call(answered(0), { method: 'GET', route: '/api/v1/conventions' });
+  for (const leg of pipeline.legs) {
+    if (random.chance(0.008)) call(refused(422, random.pick(['missing-facet', 'count-mismatch', 'not-finite'])));
+    for (const outcome of conversions.of(pipeline, leg, fault)) call(outcome);
+  }
+  if (key === 'Simulator nightly' && daysAgo === LOOPING_NIGHT) {
+    for (let i = 0; i < 90; i++) call(refused(429, 'too-many-requests'));
+  }
+  return calls;
+}
+
+/** What people tried from a desk: a few attitudes at a time, and calls that nobody could be told from. */
+function callsByHand(now: number): PastCall[] {
+  const random = new SeededRandom(31_415);
   const today = Math.floor(now / DAY) * DAY;
   const calls: PastCall[] = [];
-  for (let daysAgo = 44; daysAgo >= 0; daysAgo--) {
+  for (let daysAgo = DAYS; daysAgo >= 0; daysAgo--) {
     const day = today - daysAgo * DAY;
-    const weekend = [0, 6].includes(new Date(day).getUTCDay());
-    for (const pipeline of PIPELINES) {
-      if (daysAgo > pipeline.from || daysAgo < pipeline.until || (weekend && !pipeline.weekends)) continue;
-      const count = Math.round(pipeline.callsADay * random.between(0.6, 1.3));
-      for (let i = 0; i < count; i++) {
-        const at = Math.round(day + (pipeline.hour + pipeline.spread * random.normal() * 0.6) * 3_600_000);
-        const call = callOf(random, pipeline, daysAgo, at);
-        if (at < now) calls.push(call);
-      }
-    }
-    if (!weekend && random.chance(0.3)) {
-      const at = Math.round(day + random.between(8, 17) * 3_600_000);
-      if (at < now) calls.push(refused(random, at, null, 401, random.pick(['missing-key', 'invalid-key'])));
+    if (isWeekend(day)) continue;
+    const call = (key: string | null, outcome: Outcome): void => {
+      const at = Math.round(day + random.between(8, 17.5) * HOUR);
+      calls.push({ at, key, ...CONVERT, durationUs: Math.round(random.between(500, 1900)), ...outcome });
+    };
+    if (random.chance(0.25)) call(null, refused(401, random.pick(['missing-key', 'invalid-key'])));
+    if (daysAgo > LAPTOP.since || daysAgo < LAPTOP.noticed) continue;
+    // More of them while the gimbal's scalar stood in the wrong place and people looked for the reason.
+    for (let i = daysAgo <= 24 && daysAgo >= 18 ? 14 : 5; i > 0; i--) {
+      if (daysAgo < LAPTOP.revoked) call(LAPTOP.key, refused(401, 'revoked-key'));
+      else call(LAPTOP.key, random.chance(0.15) ? refused(422, random.pick(['missing-facet', 'invalid-facet', 'count-mismatch'])) : answered(Math.ceil(random.between(0, 12))));
     }
   }
-  return calls.sort((a, b) => a.at - b.at);
+  return calls;
 }
 
-function callOf(random: SeededRandom, pipeline: Pipeline, daysAgo: number, at: number): PastCall {
-  if (pipeline.key === 'Bench laptop' && daysAgo < 17) return refused(random, at, pipeline.key, 401, 'revoked-key');
-  const scalarWeek = pipeline.key === 'Gimbal pipeline' && daysAgo <= 24 && daysAgo >= 19;
-  if (random.chance(scalarWeek ? 0.45 : 0.012)) return refused(random, at, pipeline.key, 422, scalarWeek ? 'not-a-rotation' : random.pick(['missing-facet', 'count-mismatch', 'not-finite']));
-  if (random.chance(0.04)) return { at, key: pipeline.key, method: 'GET', route: '/api/v1/conventions', status: 200, code: null, durationUs: Math.round(random.between(700, 2500)), attitudes: 0, warnings: 0, warningCodes: [] };
-  const attitudes = Math.round(random.between(...pipeline.batch));
-  const nearLock = pipeline.key !== 'Bench laptop' && random.chance(daysAgo % 9 === 4 ? 0.35 : 0.03);
-  const warnings = nearLock ? Math.ceil(random.between(1, attitudes * 0.01 + 3)) : 0;
-  return {
-    at, key: pipeline.key, method: 'POST', route: CONVERT, status: 200, code: null,
-    durationUs: Math.round(900 + attitudes * random.between(1.2, 2.4)),
-    attitudes, warnings, warningCodes: nearLock ? (random.chance(0.2) ? ['near-gimbal-lock', 'severe-gimbal-lock'] : ['near-gimbal-lock']) : [],
-  };
+/** What the service answers to each leg of each pipeline: converted once, then remembered. */
+class Conversions {
+  readonly #flight: RecordedLegs;
+  readonly #known = new Map<string, readonly Outcome[]>();
+
+  constructor(flight: RecordedLegs) {
+    this.#flight = flight;
+  }
+
+  /** One outcome for each call that the leg takes. */
+  of(pipeline: Pipeline, leg: string, fault: Fault | null): readonly Outcome[] {
+    const name = JSON.stringify([pipeline.key, leg, fault?.says]);
+    const known = this.#known.get(name);
+    if (known) return known;
+    const samples = this.#flight.samples(leg);
+    const outcomes: Outcome[] = [];
+    for (let start = 0; start < samples.length; start += ATTITUDES_PER_CALL) {
+      const part = samples.slice(start, start + ATTITUDES_PER_CALL);
+      outcomes.push(outcomeOf(pipeline, this.#flight.sent(pipeline, part, fault), part.length));
+    }
+    this.#known.set(name, outcomes);
+    return outcomes;
+  }
 }
 
-function refused(random: SeededRandom, at: number, key: string | null, status: number, code: string): PastCall {
-  return { at, key, method: 'POST', route: CONVERT, status, code, durationUs: Math.round(random.between(400, 1600)), attitudes: 0, warnings: 0, warningCodes: [] };
+function outcomeOf({ sends, receives }: Pipeline, numbers: Float64Array, attitudes: number): Outcome {
+  const converter = createConverter(sends.convention, receives.convention);
+  try {
+    converter.convert(numbers);
+  } catch (error) {
+    if (error instanceof AttitudeError) return refused(422, error.code);
+    throw error;
+  }
+  const warnings = converter.warnings();
+  return { ...answered(attitudes), warnings: warnings.reduce((sum, { count }) => sum + count, 0), warningCodes: warnings.map(({ code }) => code) };
 }

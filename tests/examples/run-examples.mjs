@@ -16,6 +16,7 @@ let demo;
 try {
   demo = await startDemo();
   await convertTheRecording();
+  await convertAUnit();
   await refuse();
   await waitWhenAsked();
 } catch (error) {
@@ -71,6 +72,26 @@ async function convertTheRecording() {
   const near = margins.filter((margin) => margin < 1).length;
   const said = `Nearest to gimbal lock at ${rows[margins.indexOf(least)][0]} s, ${least.toFixed(4)}° from it`;
   check('the Node script tells of every attitude near gimbal lock, and of the nearest', node.stdout.includes(`Warning near-gimbal-lock: ${near} attitudes.`) && node.stdout.includes(said), `${node.stdout}; meant ${near}, ${said}`);
+}
+
+/** A unit's own recording, converted back by the service with nothing but the unit's convention, is the flight again. */
+async function convertAUnit() {
+  const recording = await run('npm', ['run', '--silent', 'recording', '--', at('gimbal.csv'), 'camera-gimbal']);
+  const { names, rows } = read('gimbal.csv');
+  const flight = read('flight.csv').rows;
+  check('a unit’s recording has its own columns, as many rows as the flight', recording.status === 0 && names.join() === 'time_s,q_x,q_y,q_z,q_w' && rows.length === flight.length, recording.stderr);
+  const from = { representation: 'quaternion', reference: 'ENU', body: 'FLU', scalar: 'last', product: 'hamilton', maps: 'body-to-reference', sign: 'any' };
+  const response = await fetch(`${demo.url}/api/v1/convert`, {
+    method: 'POST', headers: { Authorization: `Bearer ${demo.keys[0].secret}`, 'Content-Type': 'application/json' },
+    body: JSON.stringify({ from, to: { preset: 'aircraft-quaternion' }, attitudes: rows.slice(20_000, 30_000).map((row) => row.slice(1).map(Number)) }),
+  });
+  const { attitudes } = await response.json();
+  const apart = attitudes.map((back, i) => {
+    const q = flight[20_000 + i].slice(1, 5).map(Number);
+    const sign = Math.sign(back.reduce((sum, value, k) => sum + value * q[k], 0));
+    return Math.max(...back.map((value, k) => Math.abs(sign * value - q[k])));
+  });
+  check('its numbers, converted from its convention, are the flight’s to a 32-bit float', apart.length === 10_000 && Math.max(...apart) < 1.2e-7, Math.max(...apart));
 }
 
 async function refuse() {
