@@ -11,7 +11,7 @@ export default defineConfig({
         },
       },
       {
-        test: { name: 'api', include: ['tests/server/**/*.test.ts'], environment: 'node', testTimeout: 20_000 },
+        test: { name: 'api', include: ['tests/server/**/*.test.ts'], environment: 'node', globalSetup: ['tests/support/build-server.mjs'], testTimeout: 20_000 },
       },
       {
         test: {

@@ -2,6 +2,7 @@ import path from 'node:path';
 import { mkdir } from 'node:fs/promises';
 import type { Logger } from 'pino';
 import type { Config } from './config.ts';
+import { CrossChecker } from './cross-check/cross-checker.ts';
 import { connect, disconnect, type Database } from './db/database.ts';
 import { apiKeysRepository } from './db/repositories/api-keys.ts';
 import { historyRepository } from './db/repositories/history.ts';
@@ -23,6 +24,7 @@ export async function createServices({ config, logger, clock = Date.now }: Servi
   await mkdir(config.dataDirectory, { recursive: true });
   const database: Database = await connect(path.join(config.dataDirectory, 'dextral.sqlite'));
   const apiKeys = apiKeysRepository(database);
+  const crossChecker = new CrossChecker();
   return {
     config, logger, clock, database, apiKeys,
     people: peopleRepository(database),
@@ -31,7 +33,11 @@ export async function createServices({ config, logger, clock = Date.now }: Servi
     keyRing: new KeyRing(apiKeys, clock),
     tokens: new SessionTokens(config.sessionSecret),
     cookie: sessionCookie(config.publicUrl),
-    close: () => disconnect(database),
+    crossChecker,
+    async close() {
+      await crossChecker.close();
+      await disconnect(database);
+    },
   };
 }
 

@@ -53,7 +53,7 @@ export function mount<E extends Endpoint>(services: Services, router: Router, en
 /** Answers a call with a problem document, and records it first wherever that can be done. */
 export async function refuse(services: Services, call: Call, route: string, error: unknown): Promise<void> {
   let problem = problemOf(error);
-  if (problem.code === 'internal') services.logger.error({ err: error, requestId: call.id, route }, 'call failed');
+  if (PROBLEMS[problem.code].status === 500) services.logger.error({ err: error, requestId: call.id, route }, 'call failed');
   if (problem.code !== 'not-recorded') {
     try {
       await record(services, call, route, PROBLEMS[problem.code].status, problem.code);

@@ -1,7 +1,7 @@
 import { z } from 'zod';
 import { conventionFacets, conventionReference } from './convention.ts';
 import { endpoint } from './endpoint.ts';
-import { ATTITUDES_PER_CALL } from './limits.ts';
+import { ATTITUDES_PER_CALL, CROSS_CHECKED_PER_CALL } from './limits.ts';
 import { attitudeRows } from './numbers.ts';
 
 const worstCase = z.strictObject({
@@ -25,12 +25,19 @@ export const warning = z.strictObject({
   worst: worstCase,
 }).meta({ id: 'Warning' });
 
+export const crossCheckReport = z.strictObject({
+  maxUlp: z.number().meta({ description: 'Largest difference of a component from the exact one, in units of its last place. Half a unit is as near as a double can be. Differences below 1e-22, where components cancel, count as none.' }),
+  maxAngleRad: z.number().meta({ description: 'Largest angle between the attitude answered and the exact one.' }),
+  methods: z.array(z.strictObject({ method: z.string(), maxUlp: z.number().optional(), maxAngleRad: z.number() })),
+}).meta({ id: 'CrossCheck' });
+
 export const convertInput = z.strictObject({
   from: conventionReference,
   to: conventionReference,
   attitudes: attitudeRows,
   options: z.strictObject({
     readings: z.boolean().optional().meta({ description: 'Also say each attitude in a plain sentence.' }),
+    crossCheck: z.boolean().optional().meta({ description: `Compute every answer again by independent code, in 64-digit arithmetic and with a general-purpose package, and report the differences. At most ${CROSS_CHECKED_PER_CALL.toLocaleString('en')} attitudes; it takes some milliseconds each.` }),
     repair: z.enum(['none', 'nearest']).optional().meta({ description: 'What to do with numbers that are no rotation by more than 1e-6: refuse them (none, the policy when absent) or take the nearest rotation.' }),
     warnWithinDeg: z.number().min(0).max(90).optional().meta({ description: 'Warn when an attitude comes closer to gimbal lock than this; 1° when absent.' }),
   }).optional(),
@@ -43,6 +50,7 @@ export const convertOutput = z.strictObject({
   warnings: z.array(warning),
   worst: worstCase.optional().meta({ description: 'The attitude nearest to gimbal lock, where a warning tells of one.' }),
   readings: z.array(z.string()).optional(),
+  crossCheck: crossCheckReport.optional(),
   engine: z.string().meta({ description: 'Name and version of the numerical core that answered.' }),
 }).meta({ id: 'ConvertOutput' });
 

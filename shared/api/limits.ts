@@ -4,3 +4,5 @@ export const ATTITUDES_PER_CALL = 10_000;
 export const JSON_BODY_BYTES = 8 * 1024 * 1024;
 /** Rows of one page of a list. */
 export const PAGE_SIZE = { default: 50, most: 200 } as const;
+/** Most attitudes of a call that asks for a cross-check: each takes milliseconds. */
+export const CROSS_CHECKED_PER_CALL = 1_000;

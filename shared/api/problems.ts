@@ -42,6 +42,7 @@ export const PROBLEMS = {
   'invalid-convention': { status: 422, title: 'The convention contradicts itself' },
   'too-many-requests': { status: 429, title: 'Too many requests' },
   'internal': { status: 500, title: 'The service failed to answer' },
+  'cross-check-failed': { status: 500, title: 'The answer and its cross-check disagree; no answer is given' },
   'not-recorded': { status: 503, title: 'The call could not be recorded and was not answered' },
 } as const satisfies Record<string, { status: number; title: string }>;
 

@@ -1,5 +1,5 @@
 import type { ConvertInput, ConvertOutput } from '#shared/api/attitude.ts';
-import { ATTITUDES_PER_CALL } from '#shared/api/limits.ts';
+import { ATTITUDES_PER_CALL, CROSS_CHECKED_PER_CALL } from '#shared/api/limits.ts';
 import type { Convention } from '#shared/attitude/convention.ts';
 import { createConverter } from '#shared/attitude/converter.ts';
 import { readingOf } from '#shared/attitude/reading.ts';
@@ -7,15 +7,24 @@ import type { AttitudeWarning } from '#shared/attitude/warnings.ts';
 import { resolveConvention } from '../conventions/resolve-convention.ts';
 import { DomainError } from '../errors.ts';
 import type { Meter } from '../meter.ts';
+import type { CrossChecker } from '#server/cross-check/cross-checker.ts';
+import { crossChecked } from './cross-checked.ts';
 import { ENGINE } from './engine.ts';
 import { readAttitudes } from './read-attitudes.ts';
 import { pointingInto } from './refuse-attitudes.ts';
 
+export interface ConvertContext {
+  readonly crossChecker: CrossChecker;
+}
+
 /** Converts a batch between two conventions; one bad attitude refuses the whole batch. */
-export function convertAttitudes(request: ConvertInput, meter: Meter): ConvertOutput {
+export async function convertAttitudes({ crossChecker }: ConvertContext, request: ConvertInput, meter: Meter): Promise<ConvertOutput> {
   const { options = {} } = request;
   if (request.attitudes.length > ATTITUDES_PER_CALL) {
     throw new DomainError('batch-too-large', `${request.attitudes.length} attitudes are more than the ${ATTITUDES_PER_CALL} that one call may carry.`, [{ pointer: '/attitudes', message: `must hold at most ${ATTITUDES_PER_CALL} attitudes` }]);
+  }
+  if (options.crossCheck && request.attitudes.length > CROSS_CHECKED_PER_CALL) {
+    throw new DomainError('batch-too-large', `A cross-check takes at most ${CROSS_CHECKED_PER_CALL} attitudes a call, not ${request.attitudes.length}.`, [{ pointer: '/attitudes', message: `must hold at most ${CROSS_CHECKED_PER_CALL} attitudes with options.crossCheck` }]);
   }
   const from = resolveConvention(request.from, '/from');
   const to = resolveConvention(request.to, '/to');
@@ -23,6 +32,7 @@ export function convertAttitudes(request: ConvertInput, meter: Meter): ConvertOu
   const numbers = readAttitudes(request.attitudes, from, '/attitudes');
   const converted = pointingInto('/attitudes', () => converter.convert(numbers));
   const warnings = converter.warnings();
+  const checked = options.crossCheck ? await crossChecked(crossChecker, { from, to, input: numbers, output: converted }) : null;
 
   meter.attitudes += request.attitudes.length;
   meter.warnings += warnings.reduce((sum, { count }) => sum + count, 0);
@@ -36,6 +46,7 @@ export function convertAttitudes(request: ConvertInput, meter: Meter): ConvertOu
     warnings: warnings as ConvertOutput['warnings'],
     ...(worst ? { worst: worst as NonNullable<ConvertOutput['worst']> } : {}),
     ...(options.readings ? { readings: readingsOf(from, numbers, converter.inputWidth) } : {}),
+    ...(checked ? { crossCheck: checked } : {}),
     engine: ENGINE,
   };
 }

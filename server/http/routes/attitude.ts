@@ -5,5 +5,5 @@ import type { Services } from '#server/services.ts';
 import { mount } from '../mount.ts';
 
 export function attitudeRoutes(services: Services, router: Router): void {
-  mount(services, router, convertEndpoint)(({ body, meter }) => convertAttitudes(body, meter));
+  mount(services, router, convertEndpoint)(({ body, meter }) => convertAttitudes(services, body, meter));
 }

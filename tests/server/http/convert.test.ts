@@ -62,6 +62,19 @@ describe('POST /convert', () => {
   });
 });
 
+describe('options.crossCheck', () => {
+  it('reports how far the answer is from its independent recomputation', async () => {
+    const { body } = await convert({ from: DEG, to: QUATERNION, attitudes: [[30, 10, 20], [-120, 45, 170]], options: { crossCheck: true } });
+    expect(body.crossCheck.maxUlp).toBeGreaterThan(0);
+    expect(body.crossCheck.maxUlp).toBeLessThanOrEqual(0.501);
+    expect(body.crossCheck.methods.map(({ method }: { method: string }) => method)).toEqual(['mathjs BigNumber, 64 digits', 'quaternion package, double precision']);
+  });
+  it('takes a thousand attitudes at most', async () => {
+    const { status, body } = await convert({ from: DEG, to: QUATERNION, attitudes: Array.from({ length: 1001 }, () => [1, 2, 3]), options: { crossCheck: true } });
+    expect([status, body.code]).toEqual([413, 'batch-too-large']);
+  });
+});
+
 describe('POST /convert refuses', () => {
   const facets = { representation: 'quaternion', reference: 'NED', body: 'FRD', scalar: 'first', product: 'hamilton', maps: 'body-to-reference', sign: 'any' };
   const without = (name: string) => Object.fromEntries(Object.entries(facets).filter(([facet]) => facet !== name));

@@ -396,6 +396,8 @@ export interface components {
             options?: {
                 /** @description Also say each attitude in a plain sentence. */
                 readings?: boolean;
+                /** @description Compute every answer again by independent code, in 64-digit arithmetic and with a general-purpose package, and report the differences. At most 1,000 attitudes; it takes some milliseconds each. */
+                crossCheck?: boolean;
                 /**
                  * @description What to do with numbers that are no rotation by more than 1e-6: refuse them (none, the policy when absent) or take the nearest rotation.
                  * @enum {string}
@@ -413,8 +415,20 @@ export interface components {
             /** @description The attitude nearest to gimbal lock, where a warning tells of one. */
             worst?: components["schemas"]["WorstCase"];
             readings?: string[];
+            crossCheck?: components["schemas"]["CrossCheck"];
             /** @description Name and version of the numerical core that answered. */
             engine: string;
+        };
+        CrossCheck: {
+            /** @description Largest difference of a component from the exact one, in units of its last place. Half a unit is as near as a double can be. Differences below 1e-22, where components cancel, count as none. */
+            maxUlp: number;
+            /** @description Largest angle between the attitude answered and the exact one. */
+            maxAngleRad: number;
+            methods: {
+                method: string;
+                maxUlp?: number;
+                maxAngleRad: number;
+            }[];
         };
         HistoryEntry: {
             /** @description The request id, as in the X-Request-Id header of the answer. */
@@ -540,7 +554,7 @@ export interface components {
             /** @description Names the call by its request id. */
             instance: string;
             /** @enum {string} */
-            code: "malformed-json" | "malformed-request" | "invalid-cursor" | "missing-key" | "invalid-key" | "revoked-key" | "expired-key" | "not-signed-in" | "wrong-credentials" | "not-allowed" | "cross-site" | "unknown-route" | "not-found" | "unknown-preset" | "unknown-interface" | "method-not-allowed" | "conflict" | "already-revoked" | "body-too-large" | "batch-too-large" | "unsupported-media-type" | "unsupported-encoding" | "missing-facet" | "unknown-facet" | "invalid-facet" | "missing-field" | "unknown-field" | "invalid-field" | "count-mismatch" | "not-a-number" | "not-finite" | "zero-norm" | "not-a-rotation" | "improper-axes" | "unrelated-frames" | "not-representable" | "invalid-convention" | "too-many-requests" | "internal" | "not-recorded";
+            code: "malformed-json" | "malformed-request" | "invalid-cursor" | "missing-key" | "invalid-key" | "revoked-key" | "expired-key" | "not-signed-in" | "wrong-credentials" | "not-allowed" | "cross-site" | "unknown-route" | "not-found" | "unknown-preset" | "unknown-interface" | "method-not-allowed" | "conflict" | "already-revoked" | "body-too-large" | "batch-too-large" | "unsupported-media-type" | "unsupported-encoding" | "missing-facet" | "unknown-facet" | "invalid-facet" | "missing-field" | "unknown-field" | "invalid-field" | "count-mismatch" | "not-a-number" | "not-finite" | "zero-norm" | "not-a-rotation" | "improper-axes" | "unrelated-frames" | "not-representable" | "invalid-convention" | "too-many-requests" | "internal" | "cross-check-failed" | "not-recorded";
             errors: {
                 /** @description JSON pointer into the body, or ?name for a query parameter. */
                 pointer: string;
@@ -666,7 +680,7 @@ export interface operations {
                     "application/problem+json": components["schemas"]["Problem"];
                 };
             };
-            /** @description Internal Server Error. Codes: internal. */
+            /** @description Internal Server Error. Codes: internal, cross-check-failed. */
             500: {
                 headers: {
                     /** @description The id of this call in the history. */
@@ -734,7 +748,7 @@ export interface operations {
                     "application/problem+json": components["schemas"]["Problem"];
                 };
             };
-            /** @description Internal Server Error. Codes: internal. */
+            /** @description Internal Server Error. Codes: internal, cross-check-failed. */
             500: {
                 headers: {
                     /** @description The id of this call in the history. */
@@ -813,7 +827,7 @@ export interface operations {
                     "application/problem+json": components["schemas"]["Problem"];
                 };
             };
-            /** @description Internal Server Error. Codes: internal. */
+            /** @description Internal Server Error. Codes: internal, cross-check-failed. */
             500: {
                 headers: {
                     /** @description The id of this call in the history. */
@@ -881,7 +895,7 @@ export interface operations {
                     "application/problem+json": components["schemas"]["Problem"];
                 };
             };
-            /** @description Internal Server Error. Codes: internal. */
+            /** @description Internal Server Error. Codes: internal, cross-check-failed. */
             500: {
                 headers: {
                     /** @description The id of this call in the history. */
@@ -994,7 +1008,7 @@ export interface operations {
                     "application/problem+json": components["schemas"]["Problem"];
                 };
             };
-            /** @description Internal Server Error. Codes: internal. */
+            /** @description Internal Server Error. Codes: internal, cross-check-failed. */
             500: {
                 headers: {
                     /** @description The id of this call in the history. */
@@ -1086,7 +1100,7 @@ export interface operations {
                     "application/problem+json": components["schemas"]["Problem"];
                 };
             };
-            /** @description Internal Server Error. Codes: internal. */
+            /** @description Internal Server Error. Codes: internal, cross-check-failed. */
             500: {
                 headers: {
                     /** @description The id of this call in the history. */
@@ -1194,7 +1208,7 @@ export interface operations {
                     "application/problem+json": components["schemas"]["Problem"];
                 };
             };
-            /** @description Internal Server Error. Codes: internal. */
+            /** @description Internal Server Error. Codes: internal, cross-check-failed. */
             500: {
                 headers: {
                     /** @description The id of this call in the history. */
@@ -1319,7 +1333,7 @@ export interface operations {
                     "application/problem+json": components["schemas"]["Problem"];
                 };
             };
-            /** @description Internal Server Error. Codes: internal. */
+            /** @description Internal Server Error. Codes: internal, cross-check-failed. */
             500: {
                 headers: {
                     /** @description The id of this call in the history. */
@@ -1365,7 +1379,7 @@ export interface operations {
                     };
                 };
             };
-            /** @description Internal Server Error. Codes: internal. */
+            /** @description Internal Server Error. Codes: internal, cross-check-failed. */
             500: {
                 headers: {
                     /** @description The id of this call in the history. */
@@ -1418,7 +1432,7 @@ export interface operations {
                     "application/problem+json": components["schemas"]["Problem"];
                 };
             };
-            /** @description Internal Server Error. Codes: internal. */
+            /** @description Internal Server Error. Codes: internal, cross-check-failed. */
             500: {
                 headers: {
                     /** @description The id of this call in the history. */
@@ -1466,7 +1480,7 @@ export interface operations {
                     };
                 };
             };
-            /** @description Internal Server Error. Codes: internal. */
+            /** @description Internal Server Error. Codes: internal, cross-check-failed. */
             500: {
                 headers: {
                     /** @description The id of this call in the history. */
