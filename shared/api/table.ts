@@ -4,11 +4,13 @@ import type { Endpoint } from './endpoint.ts';
 import { healthEndpoint } from './health.ts';
 import { listHistoryEndpoint } from './history.ts';
 import { issueKeyEndpoint, listKeysEndpoint, revokeKeyEndpoint } from './keys.ts';
+import { ratesEndpoint } from './rates.ts';
 import { currentSessionEndpoint, signInEndpoint, signOutEndpoint } from './sessions.ts';
 
 /** Every operation of the API, in the order of the documentation. */
 export const ENDPOINTS: readonly Endpoint[] = [
   convertEndpoint,
+  ratesEndpoint,
   listConventionsEndpoint,
   getConventionEndpoint,
   listKeysEndpoint,

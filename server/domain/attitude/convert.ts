@@ -10,6 +10,7 @@ import type { Meter } from '../meter.ts';
 import type { CrossChecker } from '#server/cross-check/cross-checker.ts';
 import { crossChecked } from './cross-checked.ts';
 import { ENGINE } from './engine.ts';
+import { meterWarnings } from './meter-warnings.ts';
 import { readAttitudes } from './read-attitudes.ts';
 import { pointingInto } from './refuse-attitudes.ts';
 
@@ -35,8 +36,7 @@ export async function convertAttitudes({ crossChecker }: ConvertContext, request
   const checked = options.crossCheck ? await crossChecked(crossChecker, { from, to, input: numbers, output: converted }) : null;
 
   meter.attitudes += request.attitudes.length;
-  meter.warnings += warnings.reduce((sum, { count }) => sum + count, 0);
-  meter.warningCodes.push(...warnings.map(({ code }) => code));
+  meterWarnings(meter, warnings);
 
   const worst = nearestToLock(warnings);
   return {

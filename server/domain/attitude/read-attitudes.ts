@@ -11,27 +11,40 @@ import { DomainError } from '../errors.ts';
  * @param pointer - JSON pointer of the rows in the body.
  * @throws DomainError `count-mismatch`, `not-a-number`, `not-finite`, naming every bad row (first 100).
  */
-export function readAttitudes(rows: readonly unknown[], convention: Convention, pointer: string): Float64Array {
-  const width = NUMBERS_PER_ATTITUDE[convention.representation];
+export function readAttitudes(rows: readonly unknown[], convention: Convention, pointer: string, within = ''): Float64Array {
   const mayNest = convention.representation === 'dcm' && convention.layout === 'row-major';
+  return readRows(rows, { width: NUMBERS_PER_ATTITUDE[convention.representation], mayNest, taker: `the representation "${convention.representation}"`, pointer, within });
+}
+
+/** What a row must look like, and where it stands in the body: at `pointer`/index`within`. */
+export interface RowShape {
+  readonly width: number;
+  readonly mayNest: boolean;
+  /** What takes that many numbers, for the error. */
+  readonly taker: string;
+  readonly pointer: string;
+  readonly within: string;
+}
+
+export function readRows(rows: readonly unknown[], { width, mayNest, taker, pointer, within }: RowShape): Float64Array {
   const faults = new Faults();
   if (rows.length === 0) faults.add('count-mismatch', pointer, 'must hold at least one attitude');
   const numbers = new Float64Array(rows.length * width);
   for (let index = 0; index < rows.length; index++) {
     let row = rows[index];
-    let places = (column: number) => `${pointer}/${index}/${column}`;
+    let places = (column: number) => `${pointer}/${index}${within}/${column}`;
     if (mayNest && Array.isArray(row) && row.length === 3 && row.every(Array.isArray)) {
       if (row.every((part) => (part as unknown[]).length === 3)) {
         row = row.flat();
-        places = (column) => `${pointer}/${index}/${Math.floor(column / 3)}/${column % 3}`;
+        places = (column) => `${pointer}/${index}${within}/${Math.floor(column / 3)}/${column % 3}`;
       }
     }
     if (!Array.isArray(row)) {
-      faults.add('not-a-number', `${pointer}/${index}`, `must be an array of ${width} numbers`);
+      faults.add('not-a-number', `${pointer}/${index}${within}`, `must be an array of ${width} numbers`);
       continue;
     }
     if (row.length !== width) {
-      faults.add('count-mismatch', `${pointer}/${index}`, `has ${row.length} numbers; ${describe(convention)} takes ${width}`);
+      faults.add('count-mismatch', `${pointer}/${index}${within}`, `has ${row.length} numbers; ${taker} takes ${width}`);
       continue;
     }
     for (let column = 0; column < width; column++) {
@@ -45,8 +58,6 @@ export function readAttitudes(rows: readonly unknown[], convention: Convention, 
   faults.throwIfAny();
   return numbers;
 }
-
-const describe = (convention: Convention): string => `the representation "${convention.representation}"`;
 
 /** Collects what is wrong with a batch; the first kind of fault names the error. */
 class Faults {

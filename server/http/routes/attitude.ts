@@ -1,9 +1,12 @@
 import type { Router } from 'express';
 import { convertEndpoint } from '#shared/api/attitude.ts';
+import { ratesEndpoint } from '#shared/api/rates.ts';
 import { convertAttitudes } from '#server/domain/attitude/convert.ts';
+import { convertRates } from '#server/domain/attitude/rates.ts';
 import type { Services } from '#server/services.ts';
 import { mount } from '../mount.ts';
 
 export function attitudeRoutes(services: Services, router: Router): void {
   mount(services, router, convertEndpoint)(({ body, meter }) => convertAttitudes(services, body, meter));
+  mount(services, router, ratesEndpoint)(({ body, meter }) => convertRates(body, meter));
 }

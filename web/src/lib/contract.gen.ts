@@ -22,6 +22,28 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/rates": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /**
+         * Convert rates between two forms, each at its attitude
+         * @description Up to 10,000 samples a call.
+         *
+         *     Roles: administrator, integrator, engineer.
+         */
+        post: operations["convertRates"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/conventions": {
         parameters: {
             query?: never;
@@ -507,6 +529,63 @@ export interface components {
             /** @example aircraft-euler-deg */
             preset: string;
         };
+        /** @description body, reference: angular velocity of the body axes relative to the reference axes, components in body or in reference axes. euler: derivatives of the angles, in their order and signs. quaternion, dcm: derivatives of the attitude’s own numbers. */
+        Rate: {
+            /** @constant */
+            rate: "body";
+            /** @enum {string} */
+            unit: "deg/s" | "rad/s";
+        } | {
+            /** @constant */
+            rate: "reference";
+            /** @enum {string} */
+            unit: "deg/s" | "rad/s";
+        } | {
+            /** @constant */
+            rate: "euler";
+            /** @enum {string} */
+            unit: "deg/s" | "rad/s";
+            /** @description The Euler convention whose angles are meant; required where the attitude is given in another representation. */
+            angles?: components["schemas"]["Convention"];
+        } | {
+            /** @constant */
+            rate: "quaternion";
+        } | {
+            /** @constant */
+            rate: "dcm";
+        };
+        RatesInput: {
+            attitude: components["schemas"]["Convention"];
+            from: components["schemas"]["Rate"];
+            to: components["schemas"]["Rate"];
+            samples: {
+                attitude: number[];
+                rate: number[];
+            }[];
+        };
+        RatesOutput: {
+            /** @description null where an Euler rate does not exist, at gimbal lock; the middle one always does. */
+            rates: (number | null)[][];
+            /** @description κ of the Euler angles in play, by which a rate error can grow; 1 where there are none, null at lock. */
+            conditions: (number | null)[];
+            attitude: components["schemas"]["ConventionFacets"];
+            from: {
+                /** @enum {string} */
+                rate: "body" | "reference" | "euler" | "quaternion" | "dcm";
+                /** @enum {string} */
+                unit?: "deg/s" | "rad/s";
+                angles?: components["schemas"]["ConventionFacets"];
+            };
+            to: {
+                /** @enum {string} */
+                rate: "body" | "reference" | "euler" | "quaternion" | "dcm";
+                /** @enum {string} */
+                unit?: "deg/s" | "rad/s";
+                angles?: components["schemas"]["ConventionFacets"];
+            };
+            warnings: components["schemas"]["Warning"][];
+            engine: string;
+        };
         /** @enum {string} */
         Role: "administrator" | "integrator" | "engineer" | "reviewer";
         SignInInput: {
@@ -612,6 +691,149 @@ export interface operations {
                 };
                 content: {
                     "application/json": components["schemas"]["ConvertOutput"];
+                };
+            };
+            /** @description Bad Request. Codes: malformed-json, malformed-request, invalid-cursor. */
+            400: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Unauthorized. Codes: missing-key, invalid-key, revoked-key, expired-key, not-signed-in, wrong-credentials. */
+            401: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Forbidden. Codes: not-allowed, cross-site. */
+            403: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Payload Too Large. Codes: body-too-large, batch-too-large. */
+            413: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Unsupported Media Type. Codes: unsupported-media-type, unsupported-encoding. */
+            415: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Unprocessable Entity. Codes: unknown-preset, unknown-interface, missing-facet, unknown-facet, invalid-facet, missing-field, unknown-field, invalid-field, count-mismatch, not-a-number, not-finite, zero-norm, not-a-rotation, improper-axes, unrelated-frames, not-representable, invalid-convention. */
+            422: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Internal Server Error. Codes: internal, cross-check-failed. */
+            500: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Service Unavailable. Codes: not-recorded. */
+            503: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    convertRates: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                /**
+                 * @example {
+                 *       "attitude": {
+                 *         "preset": "aircraft-euler-deg"
+                 *       },
+                 *       "from": {
+                 *         "rate": "euler",
+                 *         "unit": "deg/s"
+                 *       },
+                 *       "to": {
+                 *         "rate": "body",
+                 *         "unit": "deg/s"
+                 *       },
+                 *       "samples": [
+                 *         {
+                 *           "attitude": [
+                 *             200,
+                 *             0,
+                 *             30
+                 *           ],
+                 *           "rate": [
+                 *             4.6,
+                 *             0,
+                 *             0
+                 *           ]
+                 *         }
+                 *       ]
+                 *     }
+                 */
+                "application/json": components["schemas"]["RatesInput"];
+            };
+        };
+        responses: {
+            /** @description OK */
+            200: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["RatesOutput"];
                 };
             };
             /** @description Bad Request. Codes: malformed-json, malformed-request, invalid-cursor. */
