@@ -26,7 +26,7 @@ export async function startTestService() {
 
   const people = new Map<Role, string>();
   for (const role of ['administrator', 'integrator', 'engineer', 'reviewer'] as const) {
-    people.set(role, await createPerson(services, { email: `${role}@petrel.example`, name: `A ${role}`, role, password: PASSWORD }));
+    people.set(role, await createPerson(services, { email: `${role}@sallowtern.example`, name: `A ${role}`, role, password: PASSWORD }));
   }
 
   return {
@@ -39,7 +39,7 @@ export async function startTestService() {
     /** An agent that keeps the cookies of somebody signed in. */
     async signedIn(role: Role) {
       const agent = request.agent(app);
-      await agent.post('/api/v1/sessions').send({ email: `${role}@petrel.example`, password: PASSWORD }).expect(201);
+      await agent.post('/api/v1/sessions').send({ email: `${role}@sallowtern.example`, password: PASSWORD }).expect(201);
       return agent;
     },
     call: () => request(app),

@@ -13,15 +13,15 @@ const signIn = (email: string, password: string) => service.call().post('/api/v1
 
 describe('sessions', () => {
   it('begin with the right password, in an HttpOnly SameSite cookie', async () => {
-    const { body, headers } = await signIn('administrator@petrel.example', PASSWORD).expect(201);
-    expect(body.person).toMatchObject({ email: 'administrator@petrel.example', role: 'administrator' });
+    const { body, headers } = await signIn('administrator@sallowtern.example', PASSWORD).expect(201);
+    expect(body.person).toMatchObject({ email: 'administrator@sallowtern.example', role: 'administrator' });
     expect(headers['set-cookie']?.[0]).toMatch(/^dextral=.*; Max-Age=43200; Path=\/; Expires=.*; HttpOnly; SameSite=Lax$/);
     expect(JSON.stringify(body)).not.toContain('password');
   });
 
   it('say the same of an unknown address and a wrong password', async () => {
-    const unknown = await signIn('nobody@petrel.example', PASSWORD);
-    const wrong = await signIn('engineer@petrel.example', 'wrong');
+    const unknown = await signIn('nobody@sallowtern.example', PASSWORD);
+    const wrong = await signIn('engineer@sallowtern.example', 'wrong');
     expect([unknown.status, unknown.body.code, unknown.body.detail]).toEqual([wrong.status, wrong.body.code, wrong.body.detail]);
     expect(unknown.status).toBe(401);
   });
@@ -31,7 +31,7 @@ describe('sessions', () => {
   });
 
   it('end on signing out, also for a copy of the cookie', async () => {
-    const { headers } = await signIn('engineer@petrel.example', PASSWORD);
+    const { headers } = await signIn('engineer@sallowtern.example', PASSWORD);
     const cookie = headers['set-cookie']![0]!.split(';')[0]!;
     await service.call().get('/api/v1/history').set('Cookie', cookie).expect(200);
     await service.call().delete('/api/v1/sessions/current').set('Cookie', cookie).expect(204);

@@ -3,6 +3,7 @@ import { Button } from '../../components/button.tsx';
 import { CodeBlock } from '../../components/code-block.tsx';
 import { Notice } from '../../components/notice.tsx';
 import { PageHeading } from '../../components/page-heading.tsx';
+import { CrossCheckPanel } from '../../features/workbench/components/cross-check-panel.tsx';
 import { ConventionEditor } from '../../features/workbench/components/convention-editor.tsx';
 import { EveryRepresentation } from '../../features/workbench/components/every-representation.tsx';
 import { NumbersEditor } from '../../features/workbench/components/numbers-editor.tsx';
@@ -34,6 +35,10 @@ export function Component() {
       </div>
       {!refused && (
         <>
+          <div className="mt-10 max-w-3xl">
+            {/* A check belongs to the numbers it was made of: others start without one. */}
+            <CrossCheckPanel key={JSON.stringify(state)} from={from.convention} to={to.convention} input={readNumbers(numbers).values} shown={result.numbers} />
+          </div>
           <section className="mt-10">
             <h2 className="mb-3 text-lg font-semibold">In every representation</h2>
             <EveryRepresentation every={result.every} />
