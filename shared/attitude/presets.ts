@@ -1,4 +1,5 @@
 import type { Convention, EulerConvention } from './convention.ts';
+import { STANDARD_PRESETS } from './standard-presets.ts';
 
 /** A convention with a name. */
 export interface Preset {
@@ -57,4 +58,4 @@ export const AIRCRAFT_PRESETS: readonly Preset[] = [
   },
 ];
 
-export const PRESETS: readonly Preset[] = AIRCRAFT_PRESETS;
+export const PRESETS: readonly Preset[] = [...AIRCRAFT_PRESETS, ...STANDARD_PRESETS];
