@@ -6,8 +6,9 @@ import { quaternionReader } from './kernels/read-quaternion.ts';
 import { axisAngleReader, readGibbs, readMrp, rotationVectorReader } from './kernels/read-vectors.ts';
 import { relabelMatrix, relabelQuaternion } from './kernels/relabel.ts';
 import { anglesOfMatrixSame, anglesOfMatrixThree, anglesOfQuaternionSame, anglesOfQuaternionThree } from './kernels/euler.gen.ts';
+import { quickAnglesOfMatrixSame, quickAnglesOfMatrixThree, quickAnglesOfQuaternionSame, quickAnglesOfQuaternionThree } from './kernels/quick-euler.gen.ts';
 import { matrixOfQuaternion } from './kernels/rotation.gen.ts';
-import { REFUSED, type Reader, type Writer } from './kernels/status.ts';
+import { FINE, REFUSED, type Reader, type Writer } from './kernels/status.ts';
 import { angleWriter } from './kernels/write-angles.ts';
 import { matrixWriter } from './kernels/write-matrix.ts';
 import { quaternionWriter } from './kernels/write-quaternion.ts';
@@ -43,7 +44,7 @@ function matrixPipeline(from: Convention, to: Convention, repair: 'none' | 'near
   const unmoved = elementMap({ left: IDENTITY, right: IDENTITY }, false, false);
   const read = from.representation === 'dcm'
     ? matrixAsMatrix({ elements, determinant: determinantOf(to), repair })
-    : angleReader(from as EulerConvention, 'matrix');
+    : angleReader(from as EulerConvention, 'matrix', to.representation === 'dcm' ? 'rounded' : 'pairs');
   if (to.representation === 'dcm') return { read, write: matrixWriter(from.representation === 'dcm' ? unmoved : elements) };
   const write = anglesFromMatrix(to as EulerConvention, from.representation === 'dcm' ? LOCK_FROM_MATRIX : LOCK_FROM_ANGLES);
   if (from.representation === 'dcm') return { read, write };
@@ -57,9 +58,15 @@ function matrixPipeline(from: Convention, to: Convention, repair: 'none' | 'near
 }
 
 function anglesFromMatrix(to: EulerConvention, lockAt: number): Writer {
-  const take = canonicalSequence(to).symmetric ? anglesOfMatrixSame : anglesOfMatrixThree;
-  const write = angleWriter(to, lockAt);
+  const { symmetric } = canonicalSequence(to);
+  return anglesWriter(symmetric ? quickAnglesOfMatrixSame : quickAnglesOfMatrixThree, symmetric ? anglesOfMatrixSame : anglesOfMatrixThree, to, lockAt);
+}
+
+/** The quick kernels' answer where it is settled, else the double-double ones'. */
+function anglesWriter(takeQuick: () => boolean, take: () => void, to: EulerConvention, lockAt: number): Writer {
+  const { write, writeQuick } = angleWriter(to, lockAt);
   return (numbers, at) => {
+    if (takeQuick() && writeQuick(numbers, at) === FINE) return FINE;
     take();
     return write(numbers, at);
   };
@@ -67,11 +74,10 @@ function anglesFromMatrix(to: EulerConvention, lockAt: number): Writer {
 
 function quaternionPipeline(from: Convention, to: Convention, repair: 'none' | 'nearest'): Pipeline {
   const relabelling = relabellingBetween(from, to);
-  const readPlain = quaternionReaderOf(from, repair);
   if (to.representation === 'dcm') {
     const write = matrixWriter(elementMap(relabelling, conjugates(from), transposesMatrix(to)));
     return {
-      read: readPlain,
+      read: quaternionReaderOf(from, repair, 'pairs'),
       write: (numbers, at) => {
         matrixOfQuaternion();
         return write(numbers, at);
@@ -79,6 +85,7 @@ function quaternionPipeline(from: Convention, to: Convention, repair: 'none' | '
     };
   }
   const components = componentMap(relabelling, conjugates(from), conjugates(to));
+  const readPlain = quaternionReaderOf(from, repair, to.representation === 'quaternion' && components.terms === 1 ? 'rounded' : 'pairs');
   const write = quaternionWriterOf(from, to, components.terms);
   return {
     read: (numbers, at) => {
@@ -90,9 +97,9 @@ function quaternionPipeline(from: Convention, to: Convention, repair: 'none' | '
   };
 }
 
-function quaternionReaderOf(from: Convention, repair: 'none' | 'nearest'): Reader {
+function quaternionReaderOf(from: Convention, repair: 'none' | 'nearest', precision: 'rounded' | 'pairs'): Reader {
   switch (from.representation) {
-    case 'euler': return angleReader(from, 'quaternion');
+    case 'euler': return angleReader(from, 'quaternion', precision);
     case 'quaternion': return quaternionReader(from, repair);
     case 'dcm': return matrixAsQuaternion({ elements: elementMap({ left: IDENTITY, right: IDENTITY }, transposesMatrix(from), false), determinant: 1, repair });
     case 'rotation-vector': return rotationVectorReader(from.unit);
@@ -115,12 +122,8 @@ function quaternionWriterOf(from: Convention, to: Convention, terms: 1 | 2 | 4):
     case 'mrp': return mrpWriter(rounded);
     case 'gibbs': return gibbsWriter(rounded);
     case 'euler': {
-      const take = canonicalSequence(to).symmetric ? anglesOfQuaternionSame : anglesOfQuaternionThree;
-      const write = angleWriter(to, LOCK_FROM_QUATERNION);
-      return (numbers, at) => {
-        take();
-        return write(numbers, at);
-      };
+      const { symmetric } = canonicalSequence(to);
+      return anglesWriter(symmetric ? quickAnglesOfQuaternionSame : quickAnglesOfQuaternionThree, symmetric ? anglesOfQuaternionSame : anglesOfQuaternionThree, to, LOCK_FROM_QUATERNION);
     }
     case 'dcm': throw new Error('a matrix is written by way of a matrix');
   }

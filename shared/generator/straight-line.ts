@@ -212,6 +212,11 @@ export class StraightLine {
     this.#effects.push({ text: (name) => `${place} = ${name(value)};`, uses: [value] });
   }
 
+  /** Returns a value after every store. */
+  answer(value: Scalar): void {
+    this.#effects.push({ text: (name) => `return ${name(value)};`, uses: [value] });
+  }
+
   storePair(slot: number, { hi, lo }: Pair): void {
     this.store(`S[${slot}]`, hi);
     this.store(`S[${slot + 1}]`, lo);

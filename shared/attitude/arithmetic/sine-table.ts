@@ -1,3 +1,4 @@
+import { split } from './two-product.ts';
 import { SINES, STEPS_PER_RIGHT_ANGLE } from './tables.gen.ts';
 
 const HALF = STEPS_PER_RIGHT_ANGLE / 2;
@@ -16,6 +17,12 @@ export const SINES_AND_COSINES: Float64Array = (() => {
   }
   return table;
 })();
+
+/** The same, each as a head of 26 bits and a tail: what the quick kernels multiply without splitting. */
+export const SPLIT_SINES_AND_COSINES: Float64Array = SINES_AND_COSINES.map((value, i) => {
+  const [head, rest] = split(i % 2 === 0 ? value : SINES_AND_COSINES[i - 1]!);
+  return i % 2 === 0 ? head : rest + value;
+});
 
 /** Signs of what the sine and the cosine of the reduced angle are, for the quadrant of the whole one. */
 export const SIGN_OF_SINE = Float64Array.of(1, -1, -1, 1);

@@ -7,6 +7,13 @@ const before = new Float64Array(18);
 /** QUATERNION between other axes, in place; its norm grows by √terms. Exact for one term and for two. */
 export function relabelQuaternion({ terms, index, sign }: ComponentMap): void {
   for (let i = 0; i < 8; i++) before[i] = S[QUATERNION + i]!;
+  if (terms === 1) {
+    for (let i = 0; i < 4; i++) {
+      S[QUATERNION + 2 * i] = sign[i]! * before[2 * index[i]!]!;
+      S[QUATERNION + 2 * i + 1] = sign[i]! * before[2 * index[i]! + 1]!;
+    }
+    return;
+  }
   for (let i = 0; i < 4; i++) {
     let hi = 0;
     let lo = 0;

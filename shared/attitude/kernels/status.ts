@@ -8,6 +8,8 @@ export const REFUSED = 2;
 export const NOT_REPRESENTABLE = 3;
 /** Fine, and at gimbal lock. */
 export const LOCKED = 4;
+/** A quick kernel cannot tell the rounding: the double-double ones must. */
+export const UNSETTLED = 5;
 
 /** Reads the attitude whose numbers start at `at` into the scratch. */
 export type Reader = (numbers: Float64Array, at: number) => number;

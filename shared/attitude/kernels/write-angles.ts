@@ -1,10 +1,11 @@
 import { arcTangentDegrees, arcTangentRadians } from '../arithmetic/arc-tangent.gen.ts';
+import { quickArcTangentDegrees, quickArcTangentRadians } from '../arithmetic/quick-arc-tangent.gen.ts';
 import { scratch as S } from '../arithmetic/scratch.ts';
 import { ANGLES, COSINE, LOCKED_FIRST, LOCKED_LAST, POINTS } from '../arithmetic/slots.ts';
 import { PI, TWO_PI } from '../arithmetic/tables.gen.ts';
 import type { EulerConvention } from '../convention.ts';
 import { canonicalSequence } from './frames.ts';
-import { FINE, LOCKED, type Writer } from './status.ts';
+import { FINE, LOCKED, UNSETTLED, type Writer } from './status.ts';
 
 /** The four things that settle where an angle's number stands and how it is written. */
 interface Listing {
@@ -18,11 +19,24 @@ interface Listing {
  * Writes the canonical POINTS as the numbers of an Euler convention: turned into angles, signed, put in their ranges
  * and their order. Where COSINE is not above `lockAt` the last applied angle is 0 and the first carries what is left.
  */
-export function angleWriter(convention: EulerConvention, lockAt: number): Writer {
+export interface AngleWriters {
+  /** From POINTS as pairs. */
+  readonly write: Writer;
+  /** From POINTS as heads and tails, away from lock; UNSETTLED where the error could change a rounding. */
+  readonly writeQuick: Writer;
+}
+
+/** Bounds of the quick arctangent's error, the points' own included. */
+const QUICK_ERROR_RADIANS = 2 ** -69;
+const QUICK_ERROR_DEGREES = 2 ** -63;
+
+export function angleWriter(convention: EulerConvention, lockAt: number): AngleWriters {
   const { symmetric, lastSense, placeOfApplied } = canonicalSequence(convention);
   const { order, signs, range } = convention;
   const degrees = convention.unit === 'deg';
   const arcTangent = degrees ? arcTangentDegrees : arcTangentRadians;
+  const quickArcTangent = degrees ? quickArcTangentDegrees : quickArcTangentRadians;
+  const quickError = degrees ? QUICK_ERROR_DEGREES : QUICK_ERROR_RADIANS;
   // Rx(a) Ry(b) Rx(c) = Rx(a + π) Ry(−b) Rx(c + π): how a negated middle angle is kept positive when listed.
   const mirrored = symmetric && signs[1] < 0;
   const carrier = convention.motion === 'extrinsic' ? 2 : 0;
@@ -40,7 +54,35 @@ export function angleWriter(convention: EulerConvention, lockAt: number): Writer
   const positiveAt = listings.findIndex(({ positive }) => positive);
   const middleAt = listings.findIndex(({ middle }) => middle);
 
-  return (numbers, at) => {
+  /** Lists ANGLES, known to within `error`; whether every number is then settled. */
+  function list(numbers: Float64Array, at: number, error: number): boolean {
+    let settled = true;
+    for (let i = 0; i < 3; i++) {
+      const factor = factors[i]!;
+      let hi = factor * S[slots[i]!]!;
+      let lo = factor * S[slots[i]! + 1]!;
+      if (i === positiveAt && hi + lo < 0) {
+        const s = turnHigh + hi;
+        lo = hi - (s - turnHigh) + (turnLow + lo);
+        hi = s;
+      }
+      let rounded = hi + (lo - error);
+      settled = settled && rounded === hi + (lo + error);
+      if (i !== middleAt) {
+        if (rounded === -halfHigh) {
+          // −180° is +180°, and −π itself is +π; the double nearest to an angle just above −π stands.
+          settled = settled && error === 0;
+          if (degrees || lo === -halfLow) rounded = halfHigh;
+        }
+        // What rounds to a full turn is 0.
+        if (i === positiveAt && rounded === turnHigh) rounded = 0;
+      }
+      numbers[at + i] = rounded + 0;
+    }
+    return settled;
+  }
+
+  function write(numbers: Float64Array, at: number): number {
     const locked = S[COSINE]! <= lockAt;
     if (locked) {
       const flat = symmetric ? POINTS + 4 : POINTS + 6;
@@ -59,22 +101,22 @@ export function angleWriter(convention: EulerConvention, lockAt: number): Writer
       arcTangent(POINTS + 8, ANGLES + 4);
     }
     arcTangent(POINTS + 4, ANGLES + 2);
-    for (let i = 0; i < 3; i++) {
-      const factor = factors[i]!;
-      let hi = factor * S[slots[i]!]!;
-      const lo = factor * S[slots[i]! + 1]!;
-      if (i !== middleAt) {
-        if (i === positiveAt && hi < 0) {
-          // Correctly rounded on the whole; what rounds to a full turn is 0.
-          const s = turnHigh + hi;
-          hi = s + (hi - (s - turnHigh) + (turnLow + lo));
-          if (hi === turnHigh) hi = 0;
-        } else if (hi === -halfHigh && (degrees || lo === -halfLow)) hi = halfHigh;
-      }
-      numbers[at + i] = hi + 0;
-    }
+    list(numbers, at, 0);
     return locked ? LOCKED : FINE;
-  };
+  }
+
+  function writeQuick(numbers: Float64Array, at: number): number {
+    if (mirrored) {
+      negatePoint(POINTS);
+      negatePoint(POINTS + 8);
+    }
+    quickArcTangent(POINTS, ANGLES);
+    quickArcTangent(POINTS + 4, ANGLES + 2);
+    quickArcTangent(POINTS + 8, ANGLES + 4);
+    return list(numbers, at, quickError) ? FINE : UNSETTLED;
+  }
+
+  return { write, writeQuick };
 }
 
 function negatePoint(slot: number): void {
