@@ -5,13 +5,19 @@ import type { Config } from './config.ts';
 import { CrossChecker } from './cross-check/cross-checker.ts';
 import { connect, disconnect, type Database } from './db/database.ts';
 import { apiKeysRepository } from './db/repositories/api-keys.ts';
+import { limitsRepository } from './db/repositories/limits.ts';
+import { usageRepository } from './db/repositories/usage.ts';
 import { historyRepository } from './db/repositories/history.ts';
 import { peopleRepository } from './db/repositories/people.ts';
 import { sessionsRepository } from './db/repositories/sessions.ts';
 import type { Clock } from './domain/clock.ts';
 import { KeyRing } from './domain/keys/key-ring.ts';
+import { LimitTable } from './domain/limits/limit-table.ts';
+import { ParallelCalls } from './domain/limits/parallel-calls.ts';
+import { Quota } from './domain/limits/quota.ts';
 import { SessionTokens } from './domain/sessions/session-tokens.ts';
 import { sessionCookie } from './http/cookie.ts';
+import { createRateLimiter } from './http/rate-limiter.ts';
 
 export interface ServiceOptions {
   readonly config: Config;
@@ -25,11 +31,17 @@ export async function createServices({ config, logger, clock = Date.now }: Servi
   const database: Database = await connect(path.join(config.dataDirectory, 'dextral.sqlite'));
   const apiKeys = apiKeysRepository(database);
   const crossChecker = new CrossChecker();
+  const usage = usageRepository(database);
   return {
     config, logger, clock, database, apiKeys,
     people: peopleRepository(database),
     sessions: sessionsRepository(database),
     history: historyRepository(database),
+    usage,
+    limits: await LimitTable.load(limitsRepository(database)),
+    quota: new Quota(usage, clock),
+    parallel: new ParallelCalls(),
+    limitRate: createRateLimiter(),
     keyRing: new KeyRing(apiKeys, clock),
     tokens: new SessionTokens(config.sessionSecret),
     cookie: sessionCookie(config.publicUrl),

@@ -1,6 +1,7 @@
 import type { Sequelize } from 'sequelize';
 import { SequelizeStorage, Umzug } from 'umzug';
 import { firstTables } from './migrations/0001-first-tables.ts';
+import { limitsAndUsage } from './migrations/0002-limits-and-usage.ts';
 
 /** One step of the schema, in raw SQL: Sequelize's own column changes rebuild a table and lose its cascade children. */
 export interface Migration {
@@ -8,7 +9,7 @@ export interface Migration {
   readonly statements: readonly string[];
 }
 
-const MIGRATIONS: readonly Migration[] = [firstTables];
+const MIGRATIONS: readonly Migration[] = [firstTables, limitsAndUsage];
 
 /** Brings the schema up to date; returns the names of the steps it took. */
 export async function migrate(sequelize: Sequelize): Promise<string[]> {

@@ -36,7 +36,7 @@ export async function seedDemo({ people, database, config, clock }: Services): P
     createdAt: now - key.issuedDaysAgo * DAY,
     expiresAt: key.expiresInDays === undefined ? null : now + key.expiresInDays * DAY,
     revokedAt: key.revokedDaysAgo === undefined ? null : now - key.revokedDaysAgo * DAY,
-    lastUsedAt: null,
+    lastUsedAt: null, requestsPerMinute: null, attitudesPerMonth: null, attitudesPerCall: null, parallelRequests: null,
   }));
   const keyByName = new Map(apiKeys.map((key) => [key.name, key]));
   await insertSeed(database, {

@@ -1,4 +1,5 @@
 import { reachOf, type Permission, type Role } from '#shared/api/roles.ts';
+import type { KeyLimits } from '#server/db/repositories/api-keys.ts';
 import { DomainError } from './errors.ts';
 
 /** Who is asking: a pipeline with an API key, or a person signed in to the console. */
@@ -10,7 +11,12 @@ export interface Caller {
   readonly keyId: string | null;
   readonly personId: string | null;
   readonly sessionId: string | null;
+  /** Limits of the key that are tighter than its role's. */
+  readonly keyLimits: KeyLimits | null;
 }
+
+/** Whose use is metered: the key, or the person signed in. */
+export const subjectOf = ({ keyId, ownerId }: Caller): string => keyId ?? ownerId;
 
 /**
  * What the caller may reach of what a permission covers: null for everything, else the owner whose things they are.

@@ -5,10 +5,13 @@ export class DomainError extends Error {
   override readonly name = 'DomainError';
   readonly code: ProblemCode;
   readonly items: readonly ProblemItem[];
+  /** When the same request may succeed; null where waiting does not help. */
+  readonly retryAfterSeconds: number | null;
 
-  constructor(code: ProblemCode, detail: string, items: readonly ProblemItem[] = []) {
+  constructor(code: ProblemCode, detail: string, items: readonly ProblemItem[] = [], retryAfterSeconds: number | null = null) {
     super(detail);
     this.code = code;
     this.items = items;
+    this.retryAfterSeconds = retryAfterSeconds;
   }
 }

@@ -1,8 +1,66 @@
-/** What a call has used and what it was warned of; kept in the history with the answer. */
+import { DomainError } from './errors.ts';
+import type { Limits } from './limits/limit-table.ts';
+import { nextMonth, type Quota, type Reservation } from './limits/quota.ts';
+
+/** What a call uses and what it is warned of: spent before the work, kept in the history with the answer. */
 export interface Meter {
-  attitudes: number;
+  readonly attitudes: number;
   warnings: number;
-  warningCodes: string[];
+  readonly warningCodes: string[];
+  /**
+   * Sets attitudes aside for this call.
+   * @throws DomainError `batch-too-large` beyond what one call may carry, `quota-exceeded` beyond what is left this month.
+   */
+  spend(attitudes: number, pointer: string): void;
 }
 
-export const emptyMeter = (): Meter => ({ attitudes: 0, warnings: 0, warningCodes: [] });
+/** A meter of the caller's quota. `settle` books what was spent, or gives it back where the call was refused. */
+export class QuotaMeter implements Meter {
+  attitudes = 0;
+  warnings = 0;
+  readonly warningCodes: string[] = [];
+  readonly #quota: Quota;
+  readonly #subject: string;
+  readonly #limits: Limits;
+  readonly #now: number;
+  readonly #reservations: Reservation[] = [];
+
+  constructor(quota: Quota, subject: string, limits: Limits, now: number) {
+    this.#quota = quota;
+    this.#subject = subject;
+    this.#limits = limits;
+    this.#now = now;
+  }
+
+  spend(attitudes: number, pointer: string): void {
+    const { attitudesPerCall, attitudesPerMonth } = this.#limits;
+    if (attitudes > attitudesPerCall) {
+      throw new DomainError('batch-too-large', `${attitudes} are more than the ${attitudesPerCall} that one call of yours may carry.`, [{ pointer, message: `must hold at most ${attitudesPerCall}` }]);
+    }
+    const reservation = this.#quota.reserve(this.#subject, attitudes, attitudesPerMonth);
+    if (!reservation) {
+      const left = this.#quota.left(this.#subject, attitudesPerMonth);
+      const seconds = Math.ceil((nextMonth(this.#now) - this.#now) / 1000);
+      throw new DomainError('quota-exceeded', `${attitudes} attitudes are more than the ${left} left of your ${attitudesPerMonth} this month; the quota starts anew on ${new Date(nextMonth(this.#now)).toISOString()}.`, [], seconds);
+    }
+    this.#reservations.push(reservation);
+    this.attitudes += attitudes;
+  }
+
+  settle(answered: boolean): void {
+    for (const reservation of this.#reservations) {
+      if (answered) reservation.book();
+      else reservation.release();
+    }
+  }
+}
+
+/** For callers without a quota: visitors, who compute nothing. */
+export class NoMeter implements Meter {
+  readonly attitudes = 0;
+  warnings = 0;
+  readonly warningCodes: string[] = [];
+  spend(): void {
+    throw new DomainError('not-allowed', 'This operation computes nothing.');
+  }
+}

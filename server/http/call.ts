@@ -1,7 +1,7 @@
 import { randomUUID } from 'node:crypto';
 import type { Request, Response } from 'express';
 import type { Caller } from '#server/domain/caller.ts';
-import { emptyMeter, type Meter } from '#server/domain/meter.ts';
+import { NoMeter, type Meter } from '#server/domain/meter.ts';
 import type { PersonDocument } from '#server/domain/sessions/sessions.ts';
 
 /** One API call from its first byte to its record: filled in as it goes. */
@@ -11,7 +11,7 @@ export interface Call {
   readonly response: Response;
   readonly startedAt: number;
   readonly startedNs: bigint;
-  readonly meter: Meter;
+  meter: Meter;
   caller: Caller | null;
   person: PersonDocument | null;
 }
@@ -20,5 +20,5 @@ export interface Call {
 export function openCall(request: Request, response: Response, now: number): Call {
   const id = randomUUID();
   response.setHeader('X-Request-Id', id);
-  return { id, request, response, startedAt: now, startedNs: process.hrtime.bigint(), meter: emptyMeter(), caller: null, person: null };
+  return { id, request, response, startedAt: now, startedNs: process.hrtime.bigint(), meter: new NoMeter(), caller: null, person: null };
 }

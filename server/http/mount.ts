@@ -5,6 +5,7 @@ import { PROBLEMS } from '#shared/api/problems.ts';
 import type { Caller } from '#server/domain/caller.ts';
 import type { Meter } from '#server/domain/meter.ts';
 import type { Services } from '../services.ts';
+import { admit, type Admission } from './admit.ts';
 import { authenticate } from './authenticate.ts';
 import { openCall, type Call } from './call.ts';
 import { explainIssues } from './explain-issues.ts';
@@ -34,17 +35,23 @@ export function mount<E extends Endpoint>(services: Services, router: Router, en
   return (handler: (input: Input<E>) => Answer<E> | Promise<Answer<E>>): void => {
     router[endpoint.method](endpoint.path.replaceAll(/\{(\w+)\}/g, ':$1'), async (request, response) => {
       const call = openCall(request, response, services.clock());
+      let admission: Admission | null = null;
+      let answered = false;
       try {
         await authenticate(services, endpoint, call);
+        admission = await admit(services, call);
         const input = await parseInput(endpoint, call);
         const answer = await handler(input as Input<E>);
         const text = answer === undefined ? undefined : JSON.stringify(answer);
         if (recorded(endpoint, call)) await record(services, call, route, endpoint.status, null);
+        answered = true;
         response.status(endpoint.status);
         if (text === undefined) response.end();
         else response.type('application/json').send(text);
       } catch (error) {
         await refuse(services, call, route, error);
+      } finally {
+        admission?.leave(answered);
       }
     });
   };

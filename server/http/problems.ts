@@ -21,7 +21,7 @@ export class HttpProblem extends Error {
 /** What any error says to the outside. An error that nobody foresaw says nothing of itself. */
 export function problemOf(error: unknown): HttpProblem {
   if (error instanceof HttpProblem) return error;
-  if (error instanceof DomainError) return new HttpProblem(error.code, error.message, error.items, challengeFor(error.code));
+  if (error instanceof DomainError) return new HttpProblem(error.code, error.message, error.items, { ...challengeFor(error.code), ...(error.retryAfterSeconds === null ? {} : { 'Retry-After': String(error.retryAfterSeconds) }) });
   if (error instanceof WriteQueueFullError || error instanceof WriteQueueClosedError) {
     return new HttpProblem('not-recorded', 'The service records every call before it answers, and cannot record this one now. Try again.', [], { 'Retry-After': '1' });
   }

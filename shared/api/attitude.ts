@@ -60,7 +60,7 @@ export const convertEndpoint = endpoint({
   description: `Up to ${ATTITUDES_PER_CALL.toLocaleString('en')} attitudes a call. One bad attitude refuses the batch and names every bad index (first 100). 90 given in degrees is exact gimbal lock; the double nearest to π/2 given in radians is not.`,
   auth: 'caller', permission: 'attitude.compute', recordsSessions: true,
   body: convertInput, status: 200, response: convertOutput,
-  problems: [400, 401, 403, 413, 415, 422, 503],
+  problems: [400, 401, 403, 413, 415, 422, 429, 503],
   example: { from: { preset: 'aircraft-euler-deg' }, to: { preset: 'aircraft-quaternion' }, attitudes: [[30, 10, 20]], options: { readings: true } },
 });
 

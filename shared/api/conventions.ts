@@ -23,12 +23,12 @@ export const preset = z.strictObject({
 
 export const listConventionsEndpoint = endpoint({
   id: 'listConventions', method: 'get', path: '/conventions', tag: 'Conventions', summary: 'List the presets',
-  auth: 'caller', permission: 'conventions.read', status: 200, response: z.strictObject({ items: z.array(preset) }), problems: [401, 403, 503],
+  auth: 'caller', permission: 'conventions.read', status: 200, response: z.strictObject({ items: z.array(preset) }), problems: [401, 403, 429, 503],
 });
 
 export const getConventionEndpoint = endpoint({
   id: 'getConvention', method: 'get', path: '/conventions/{id}', tag: 'Conventions', summary: 'One preset with every facet',
-  auth: 'caller', permission: 'conventions.read', params: z.strictObject({ id: z.string() }), status: 200, response: preset, problems: [401, 403, 404, 503],
+  auth: 'caller', permission: 'conventions.read', params: z.strictObject({ id: z.string() }), status: 200, response: preset, problems: [401, 403, 404, 429, 503],
 });
 
 export type PresetDocument = z.output<typeof preset>;

@@ -15,7 +15,7 @@ export interface Endpoint<
   readonly method: 'get' | 'post' | 'put' | 'patch' | 'delete';
   /** Below the base path, parameters in braces as in OpenAPI. */
   readonly path: string;
-  readonly tag: 'Attitude' | 'Conventions' | 'Keys' | 'History' | 'Session' | 'Health';
+  readonly tag: 'Attitude' | 'Conventions' | 'Keys' | 'History' | 'Usage' | 'Session' | 'Health';
   readonly summary: string;
   readonly description?: string;
   /** `public` needs nothing; `visitor` takes a session where there is one; `caller` needs an API key or a session; `session` a person signed in to the console. */

@@ -35,7 +35,7 @@ export const listHistoryEndpoint = endpoint({
     nextCursor: z.string().nullable().meta({ description: 'Give it as `cursor` for the next page; null on the last.' }),
     routes: z.array(z.string()).meta({ description: 'Routes that the caller’s history holds, for filtering.' }),
   }),
-  problems: [400, 401, 403, 422, 503],
+  problems: [400, 401, 403, 422, 429, 503],
 });
 
 export type HistoryQuery = z.output<typeof historyQuery>;

@@ -22,20 +22,20 @@ export const issueKeyInput = z.strictObject({
 
 export const listKeysEndpoint = endpoint({
   id: 'listKeys', method: 'get', path: '/keys', tag: 'Keys', summary: 'List API keys, newest first',
-  auth: 'session', permission: 'keys.read', status: 200, response: z.strictObject({ items: z.array(apiKey) }), problems: [401, 403],
+  auth: 'session', permission: 'keys.read', status: 200, response: z.strictObject({ items: z.array(apiKey) }), problems: [401, 403, 429],
 });
 
 export const issueKeyEndpoint = endpoint({
   id: 'issueKey', method: 'post', path: '/keys', tag: 'Keys', summary: 'Issue an API key; its secret is in this answer only',
   auth: 'session', permission: 'keys.issue', body: issueKeyInput, status: 201,
-  response: z.strictObject({ key: apiKey, secret: z.string() }), problems: [400, 401, 403, 413, 415, 422, 503],
+  response: z.strictObject({ key: apiKey, secret: z.string() }), problems: [400, 401, 403, 413, 415, 422, 429, 503],
   example: { name: 'Attitude pipeline', role: 'engineer', expiresAt: null },
 });
 
 export const revokeKeyEndpoint = endpoint({
   id: 'revokeKey', method: 'post', path: '/keys/{id}/revoke', tag: 'Keys', summary: 'Revoke an API key; the next call with it is refused',
   auth: 'session', permission: 'keys.revoke', params: z.strictObject({ id: z.string() }), status: 200,
-  response: z.strictObject({ key: apiKey }), problems: [401, 403, 404, 409, 503],
+  response: z.strictObject({ key: apiKey }), problems: [401, 403, 404, 409, 429, 503],
 });
 
 export type ApiKeyDocument = z.output<typeof apiKey>;

@@ -43,7 +43,7 @@ export const ratesEndpoint = endpoint({
   description: `Up to ${ATTITUDES_PER_CALL.toLocaleString('en')} samples a call.`,
   auth: 'caller', permission: 'attitude.compute', recordsSessions: true,
   body: ratesInput, status: 200, response: ratesOutput,
-  problems: [400, 401, 403, 413, 415, 422, 503],
+  problems: [400, 401, 403, 413, 415, 422, 429, 503],
   example: { attitude: { preset: 'aircraft-euler-deg' }, from: { rate: 'euler', unit: 'deg/s' }, to: { rate: 'body', unit: 'deg/s' }, samples: [{ attitude: [200, 0, 30], rate: [4.6, 0, 0] }] },
 });
 

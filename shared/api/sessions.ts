@@ -21,5 +21,5 @@ export const currentSessionEndpoint = endpoint({
 
 export const signOutEndpoint = endpoint({
   id: 'signOut', method: 'delete', path: '/sessions/current', tag: 'Session', summary: 'Sign out',
-  auth: 'session', status: 204, problems: [401, 403, 503],
+  auth: 'session', status: 204, problems: [401, 403, 429, 503],
 });

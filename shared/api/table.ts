@@ -6,6 +6,7 @@ import { listHistoryEndpoint } from './history.ts';
 import { issueKeyEndpoint, listKeysEndpoint, revokeKeyEndpoint } from './keys.ts';
 import { ratesEndpoint } from './rates.ts';
 import { currentSessionEndpoint, signInEndpoint, signOutEndpoint } from './sessions.ts';
+import { changeKeyLimitsEndpoint, changeLimitsEndpoint, listLimitsEndpoint, ownUsageEndpoint, usageByKeyEndpoint } from './usage.ts';
 
 /** Every operation of the API, in the order of the documentation. */
 export const ENDPOINTS: readonly Endpoint[] = [
@@ -16,7 +17,12 @@ export const ENDPOINTS: readonly Endpoint[] = [
   listKeysEndpoint,
   issueKeyEndpoint,
   revokeKeyEndpoint,
+  changeKeyLimitsEndpoint,
   listHistoryEndpoint,
+  ownUsageEndpoint,
+  usageByKeyEndpoint,
+  listLimitsEndpoint,
+  changeLimitsEndpoint,
   signInEndpoint,
   currentSessionEndpoint,
   signOutEndpoint,

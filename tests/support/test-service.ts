@@ -34,7 +34,7 @@ export async function startTestService() {
     /** A key of a role, owned by the person of that role. */
     async key(role: Role, expiresAt: string | null = null) {
       const ownerId = people.get(role)!;
-      return issueKey(services, { kind: 'session', role: 'administrator', ownerId, keyId: null, personId: ownerId, sessionId: null }, { name: `${role} key`, role, expiresAt });
+      return issueKey(services, { kind: 'session', role: 'administrator', ownerId, keyId: null, personId: ownerId, sessionId: null, keyLimits: null }, { name: `${role} key`, role, expiresAt });
     },
     /** An agent that keeps the cookies of somebody signed in. */
     async signedIn(role: Role) {

@@ -13,6 +13,11 @@ export interface ApiKeyRow {
   expiresAt: number | null;
   lastUsedAt: number | null;
   revokedAt: number | null;
+  /** Tighter limits than the role's; null for the role's own. */
+  requestsPerMinute: number | null;
+  attitudesPerMonth: number | null;
+  attitudesPerCall: number | null;
+  parallelRequests: number | null;
 }
 
 export type ApiKeyModel = ModelStatic<Model<ApiKeyRow>>;
@@ -30,5 +35,9 @@ export function defineApiKey(sequelize: Sequelize): ApiKeyModel {
     expiresAt: { type: DataTypes.INTEGER },
     lastUsedAt: { type: DataTypes.INTEGER },
     revokedAt: { type: DataTypes.INTEGER },
+    requestsPerMinute: { type: DataTypes.INTEGER },
+    attitudesPerMonth: { type: DataTypes.INTEGER },
+    attitudesPerCall: { type: DataTypes.INTEGER },
+    parallelRequests: { type: DataTypes.INTEGER },
   }, { tableName: 'api_keys' });
 }

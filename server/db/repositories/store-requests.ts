@@ -14,7 +14,7 @@ const valuesOf = (row: NewRequest): (string | number | null)[] => [
   row.requestId, row.at, row.keyId, row.personId, row.ownerId, row.method, row.route, row.status, row.code, row.durationUs, row.attitudes, row.warnings, row.warningCodes,
 ];
 
-/** Stores a group of history rows and the last use of their keys, in raw SQL: building a model per row costs more than the insert. */
+/** Stores a group of history rows, the last use of their keys and the meter, in raw SQL: building a model per row costs more than the insert. */
 export async function storeRequests(sequelize: Sequelize, rows: readonly NewRequest[], transaction: Transaction): Promise<void> {
   for (let start = 0; start < rows.length; start += ROWS_PER_STATEMENT) {
     const part = rows.slice(start, start + ROWS_PER_STATEMENT);
@@ -23,9 +23,40 @@ export async function storeRequests(sequelize: Sequelize, rows: readonly NewRequ
       bind: part.flatMap(valuesOf), transaction, type: QueryTypes.INSERT,
     });
   }
-  const lastUse = new Map<string, number>();
-  for (const { keyId, at } of rows) if (keyId !== null) lastUse.set(keyId, Math.max(at, lastUse.get(keyId) ?? 0));
-  for (const [keyId, at] of lastUse) {
+  for (const [keyId, at] of lastUses(rows)) {
     await sequelize.query('UPDATE api_keys SET last_used_at = MAX(COALESCE(last_used_at, 0), $1) WHERE id = $2', { bind: [at, keyId], transaction, type: QueryTypes.UPDATE });
   }
+  for (const { subject, day, requests, attitudes } of usesByDay(rows)) {
+    await sequelize.query(`INSERT INTO usage_by_day (subject, day, requests, attitudes) VALUES ($1, $2, $3, $4)
+      ON CONFLICT (subject, day) DO UPDATE SET requests = requests + excluded.requests, attitudes = attitudes + excluded.attitudes`,
+    { bind: [subject, day, requests, attitudes], transaction, type: QueryTypes.INSERT });
+  }
+}
+
+function lastUses(rows: readonly NewRequest[]): Map<string, number> {
+  const latest = new Map<string, number>();
+  for (const { keyId, at } of rows) if (keyId !== null) latest.set(keyId, Math.max(at, latest.get(keyId) ?? 0));
+  return latest;
+}
+
+interface DayUse {
+  readonly subject: string;
+  readonly day: string;
+  requests: number;
+  attitudes: number;
+}
+
+/** The meter is kept in the transaction of the history, so that the two can never differ. */
+function usesByDay(rows: readonly NewRequest[]): DayUse[] {
+  const uses = new Map<string, DayUse>();
+  for (const { keyId, personId, at, attitudes } of rows) {
+    const subject = keyId ?? personId;
+    if (subject === null) continue;
+    const day = new Date(at).toISOString().slice(0, 10);
+    const use = uses.get(`${subject} ${day}`) ?? { subject, day, requests: 0, attitudes: 0 };
+    use.requests++;
+    use.attitudes += attitudes;
+    uses.set(`${subject} ${day}`, use);
+  }
+  return [...uses.values()];
 }

@@ -1,5 +1,5 @@
 import type { ConvertInput, ConvertOutput } from '#shared/api/attitude.ts';
-import { ATTITUDES_PER_CALL, CROSS_CHECKED_PER_CALL } from '#shared/api/limits.ts';
+import { CROSS_CHECKED_PER_CALL } from '#shared/api/limits.ts';
 import type { Convention } from '#shared/attitude/convention.ts';
 import { createConverter } from '#shared/attitude/converter.ts';
 import { readingOf } from '#shared/attitude/reading.ts';
@@ -21,9 +21,7 @@ export interface ConvertContext {
 /** Converts a batch between two conventions; one bad attitude refuses the whole batch. */
 export async function convertAttitudes({ crossChecker }: ConvertContext, request: ConvertInput, meter: Meter): Promise<ConvertOutput> {
   const { options = {} } = request;
-  if (request.attitudes.length > ATTITUDES_PER_CALL) {
-    throw new DomainError('batch-too-large', `${request.attitudes.length} attitudes are more than the ${ATTITUDES_PER_CALL} that one call may carry.`, [{ pointer: '/attitudes', message: `must hold at most ${ATTITUDES_PER_CALL} attitudes` }]);
-  }
+  meter.spend(request.attitudes.length, '/attitudes');
   if (options.crossCheck && request.attitudes.length > CROSS_CHECKED_PER_CALL) {
     throw new DomainError('batch-too-large', `A cross-check takes at most ${CROSS_CHECKED_PER_CALL} attitudes a call, not ${request.attitudes.length}.`, [{ pointer: '/attitudes', message: `must hold at most ${CROSS_CHECKED_PER_CALL} attitudes with options.crossCheck` }]);
   }
@@ -35,7 +33,6 @@ export async function convertAttitudes({ crossChecker }: ConvertContext, request
   const warnings = converter.warnings();
   const checked = options.crossCheck ? await crossChecked(crossChecker, { from, to, input: numbers, output: converted }) : null;
 
-  meter.attitudes += request.attitudes.length;
   meterWarnings(meter, warnings);
 
   const worst = nearestToLock(warnings);

@@ -1,9 +1,7 @@
 import type { RatesInput, RatesOutput } from '#shared/api/rates.ts';
-import { ATTITUDES_PER_CALL } from '#shared/api/limits.ts';
 import { createRateConverter } from '#shared/attitude/rates/rate-converter.ts';
 import { NUMBERS_PER_RATE, type Rate } from '#shared/attitude/rates/rate.ts';
 import { resolveConvention } from '../conventions/resolve-convention.ts';
-import { DomainError } from '../errors.ts';
 import type { Meter } from '../meter.ts';
 import { ENGINE } from './engine.ts';
 import { meterWarnings } from './meter-warnings.ts';
@@ -14,9 +12,7 @@ import { resolveRate } from './resolve-rate.ts';
 
 /** Converts a batch of rates, each at its attitude; one bad sample refuses the whole batch. */
 export function convertRates(request: RatesInput, meter: Meter): RatesOutput {
-  if (request.samples.length > ATTITUDES_PER_CALL) {
-    throw new DomainError('batch-too-large', `${request.samples.length} samples are more than the ${ATTITUDES_PER_CALL} that one call may carry.`, [{ pointer: '/samples', message: `must hold at most ${ATTITUDES_PER_CALL} samples` }]);
-  }
+  meter.spend(request.samples.length, '/samples');
   const attitude = resolveConvention(request.attitude, '/attitude');
   const from = resolveRate(request.from, attitude, '/from');
   const to = resolveRate(request.to, attitude, '/to');
@@ -27,7 +23,6 @@ export function convertRates(request: RatesInput, meter: Meter): RatesOutput {
   const converted = pointingInto('/samples', () => converter.convert(attitudes, rates));
   const warnings = converter.warnings();
 
-  meter.attitudes += request.samples.length;
   meterWarnings(meter, warnings);
   return {
     rates: request.samples.map((_, i) => Array.from(converted.rates.subarray(i * converter.outputWidth, (i + 1) * converter.outputWidth), (rate) => (Number.isNaN(rate) ? null : rate))),

@@ -26,7 +26,7 @@ export class KeyRing {
     if (!looksLikeKey(secret)) throw new DomainError('invalid-key', 'This is not a key of this service: its shape or its check characters are wrong.');
     const key = await this.#find(hashSecret(secret));
     if (!key) throw new DomainError('invalid-key', 'This service has issued no such key.');
-    const caller: Caller = { kind: 'key', role: key.role, ownerId: key.ownerId, keyId: key.id, personId: null, sessionId: null };
+    const caller: Caller = { kind: 'key', role: key.role, ownerId: key.ownerId, keyId: key.id, personId: null, sessionId: null, keyLimits: key };
     if (key.revokedAt !== null) throw new RefusedKeyError('revoked-key', `The key ${key.prefix} was revoked on ${new Date(key.revokedAt).toISOString()}.`, caller);
     if (key.expiresAt !== null && key.expiresAt <= this.#clock()) throw new RefusedKeyError('expired-key', `The key ${key.prefix} expired on ${new Date(key.expiresAt).toISOString()}.`, caller);
     return caller;

@@ -30,6 +30,7 @@ export async function issueKey(context: KeysContext, caller: Caller, input: Issu
   await context.apiKeys.insert({
     id, name: input.name, prefix, secretHash: hash, role: input.role, ownerId: caller.ownerId, createdBy: caller.ownerId,
     createdAt: now, expiresAt, lastUsedAt: null, revokedAt: null,
+    requestsPerMinute: null, attitudesPerMonth: null, attitudesPerCall: null, parallelRequests: null,
   });
   return { key: presentKey(await existing(context, id)), secret };
 }

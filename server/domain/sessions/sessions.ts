@@ -52,7 +52,7 @@ export async function resumeSession(context: SessionsContext, token: string): Pr
   if (!person || person.deactivatedAt !== null) return null;
   return {
     person: presentPerson(person),
-    caller: { kind: 'session', role: person.role, ownerId: person.id, keyId: null, personId: person.id, sessionId: session.id },
+    caller: { kind: 'session', role: person.role, ownerId: person.id, keyId: null, personId: person.id, sessionId: session.id, keyLimits: null },
   };
 }
 

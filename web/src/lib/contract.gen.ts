@@ -128,6 +128,26 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/keys/{id}/limits": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        /**
+         * Give a key tighter limits than its role
+         * @description Roles: administrator.
+         */
+        put: operations["changeKeyLimits"];
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/history": {
         parameters: {
             query?: never;
@@ -143,6 +163,88 @@ export interface paths {
          */
         get: operations["listHistory"];
         put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/usage": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /**
+         * What the caller has used this month, and what is left
+         * @description Units are attitudes computed; refused requests cost none.
+         *
+         *     For anybody signed in.
+         */
+        get: operations["ownUsage"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/usage/keys": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /**
+         * What each key has used in a month, and each role
+         * @description Roles: administrator, integrator (their own), engineer (their own), reviewer.
+         */
+        get: operations["usageByKey"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/limits": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /**
+         * Limits of every role
+         * @description Roles: administrator, integrator, engineer, reviewer.
+         */
+        get: operations["listLimits"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/limits/{role}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        /**
+         * Change the limits of a role; in force on the next request
+         * @description Roles: administrator.
+         */
+        put: operations["changeLimits"];
         post?: never;
         delete?: never;
         options?: never;
@@ -491,6 +593,38 @@ export interface components {
             /** @description When the key stops working by itself; null for never. */
             expiresAt: string | null;
         };
+        /** @description Limits of one key; null for the role’s own. The tighter of the two is in force. */
+        KeyLimits: {
+            requestsPerMinute: number | null;
+            attitudesPerMonth: number | null;
+            attitudesPerCall: number | null;
+            parallelRequests: number | null;
+        };
+        /** @description What one key, or one person signed in, may use. */
+        Limits: {
+            requestsPerMinute: number;
+            attitudesPerMonth: number;
+            /** @description Attitudes of one JSON call. */
+            attitudesPerCall: number;
+            parallelRequests: number;
+        };
+        OwnUsage: {
+            month: string;
+            requests: number;
+            attitudes: number;
+            limits: components["schemas"]["Limits"];
+            /**
+             * Format: date-time
+             * @description When the quota starts anew.
+             * @example 2026-05-04T08:30:00.000Z
+             */
+            resetsAt: string;
+            days: {
+                day: string;
+                requests: number;
+                attitudes: number;
+            }[];
+        };
         Person: {
             id: string;
             name: string;
@@ -588,12 +722,37 @@ export interface components {
         };
         /** @enum {string} */
         Role: "administrator" | "integrator" | "engineer" | "reviewer";
+        RoleLimits: {
+            role: components["schemas"]["Role"];
+            requestsPerMinute: number;
+            attitudesPerMonth: number;
+            /** @description Attitudes of one JSON call. */
+            attitudesPerCall: number;
+            parallelRequests: number;
+        };
         SignInInput: {
             email: string;
             password: string;
         };
         SignedIn: {
             person: components["schemas"]["Person"];
+        };
+        UsageByKey: {
+            month: string;
+            keys: {
+                id: string;
+                name: string;
+                prefix: string;
+                role: components["schemas"]["Role"];
+                requests: number;
+                attitudes: number;
+                attitudesPerMonth: number;
+            }[];
+            roles: {
+                role: components["schemas"]["Role"];
+                requests: number;
+                attitudes: number;
+            }[];
         };
         Warning: {
             /** @enum {string} */
@@ -633,7 +792,7 @@ export interface components {
             /** @description Names the call by its request id. */
             instance: string;
             /** @enum {string} */
-            code: "malformed-json" | "malformed-request" | "invalid-cursor" | "missing-key" | "invalid-key" | "revoked-key" | "expired-key" | "not-signed-in" | "wrong-credentials" | "not-allowed" | "cross-site" | "unknown-route" | "not-found" | "unknown-preset" | "unknown-interface" | "method-not-allowed" | "conflict" | "already-revoked" | "body-too-large" | "batch-too-large" | "unsupported-media-type" | "unsupported-encoding" | "missing-facet" | "unknown-facet" | "invalid-facet" | "missing-field" | "unknown-field" | "invalid-field" | "count-mismatch" | "not-a-number" | "not-finite" | "zero-norm" | "not-a-rotation" | "improper-axes" | "unrelated-frames" | "not-representable" | "invalid-convention" | "too-many-requests" | "internal" | "cross-check-failed" | "not-recorded";
+            code: "malformed-json" | "malformed-request" | "invalid-cursor" | "missing-key" | "invalid-key" | "revoked-key" | "expired-key" | "not-signed-in" | "wrong-credentials" | "not-allowed" | "cross-site" | "unknown-route" | "not-found" | "unknown-preset" | "unknown-interface" | "method-not-allowed" | "conflict" | "already-revoked" | "body-too-large" | "batch-too-large" | "unsupported-media-type" | "unsupported-encoding" | "missing-facet" | "unknown-facet" | "invalid-facet" | "missing-field" | "unknown-field" | "invalid-field" | "count-mismatch" | "not-a-number" | "not-finite" | "zero-norm" | "not-a-rotation" | "improper-axes" | "unrelated-frames" | "not-representable" | "invalid-convention" | "too-many-requests" | "too-many-parallel" | "quota-exceeded" | "internal" | "cross-check-failed" | "not-recorded";
             errors: {
                 /** @description JSON pointer into the body, or ?name for a query parameter. */
                 pointer: string;
@@ -750,6 +909,17 @@ export interface operations {
             };
             /** @description Unprocessable Entity. Codes: unknown-preset, unknown-interface, missing-facet, unknown-facet, invalid-facet, missing-field, unknown-field, invalid-field, count-mismatch, not-a-number, not-finite, zero-norm, not-a-rotation, improper-axes, unrelated-frames, not-representable, invalid-convention. */
             422: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Too Many Requests. Codes: too-many-requests, too-many-parallel, quota-exceeded. */
+            429: {
                 headers: {
                     /** @description The id of this call in the history. */
                     "X-Request-Id"?: string;
@@ -902,6 +1072,17 @@ export interface operations {
                     "application/problem+json": components["schemas"]["Problem"];
                 };
             };
+            /** @description Too Many Requests. Codes: too-many-requests, too-many-parallel, quota-exceeded. */
+            429: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
             /** @description Internal Server Error. Codes: internal, cross-check-failed. */
             500: {
                 headers: {
@@ -961,6 +1142,17 @@ export interface operations {
             };
             /** @description Forbidden. Codes: not-allowed, cross-site. */
             403: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Too Many Requests. Codes: too-many-requests, too-many-parallel, quota-exceeded. */
+            429: {
                 headers: {
                     /** @description The id of this call in the history. */
                     "X-Request-Id"?: string;
@@ -1049,6 +1241,17 @@ export interface operations {
                     "application/problem+json": components["schemas"]["Problem"];
                 };
             };
+            /** @description Too Many Requests. Codes: too-many-requests, too-many-parallel, quota-exceeded. */
+            429: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
             /** @description Internal Server Error. Codes: internal, cross-check-failed. */
             500: {
                 headers: {
@@ -1108,6 +1311,17 @@ export interface operations {
             };
             /** @description Forbidden. Codes: not-allowed, cross-site. */
             403: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Too Many Requests. Codes: too-many-requests, too-many-parallel, quota-exceeded. */
+            429: {
                 headers: {
                     /** @description The id of this call in the history. */
                     "X-Request-Id"?: string;
@@ -1230,6 +1444,17 @@ export interface operations {
                     "application/problem+json": components["schemas"]["Problem"];
                 };
             };
+            /** @description Too Many Requests. Codes: too-many-requests, too-many-parallel, quota-exceeded. */
+            429: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
             /** @description Internal Server Error. Codes: internal, cross-check-failed. */
             500: {
                 headers: {
@@ -1313,6 +1538,155 @@ export interface operations {
             };
             /** @description Conflict. Codes: conflict, already-revoked. */
             409: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Too Many Requests. Codes: too-many-requests, too-many-parallel, quota-exceeded. */
+            429: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Internal Server Error. Codes: internal, cross-check-failed. */
+            500: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Service Unavailable. Codes: not-recorded. */
+            503: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    changeKeyLimits: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["KeyLimits"];
+            };
+        };
+        responses: {
+            /** @description OK */
+            200: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["KeyLimits"];
+                };
+            };
+            /** @description Bad Request. Codes: malformed-json, malformed-request, invalid-cursor. */
+            400: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Unauthorized. Codes: missing-key, invalid-key, revoked-key, expired-key, not-signed-in, wrong-credentials. */
+            401: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Forbidden. Codes: not-allowed, cross-site. */
+            403: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Not Found. Codes: unknown-route, not-found. */
+            404: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Payload Too Large. Codes: body-too-large, batch-too-large. */
+            413: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Unsupported Media Type. Codes: unsupported-media-type, unsupported-encoding. */
+            415: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Unprocessable Entity. Codes: unknown-preset, unknown-interface, missing-facet, unknown-facet, invalid-facet, missing-field, unknown-field, invalid-field, count-mismatch, not-a-number, not-finite, zero-norm, not-a-rotation, improper-axes, unrelated-frames, not-representable, invalid-convention. */
+            422: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Too Many Requests. Codes: too-many-requests, too-many-parallel, quota-exceeded. */
+            429: {
                 headers: {
                     /** @description The id of this call in the history. */
                     "X-Request-Id"?: string;
@@ -1421,6 +1795,394 @@ export interface operations {
             };
             /** @description Unprocessable Entity. Codes: unknown-preset, unknown-interface, missing-facet, unknown-facet, invalid-facet, missing-field, unknown-field, invalid-field, count-mismatch, not-a-number, not-finite, zero-norm, not-a-rotation, improper-axes, unrelated-frames, not-representable, invalid-convention. */
             422: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Too Many Requests. Codes: too-many-requests, too-many-parallel, quota-exceeded. */
+            429: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Internal Server Error. Codes: internal, cross-check-failed. */
+            500: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Service Unavailable. Codes: not-recorded. */
+            503: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    ownUsage: {
+        parameters: {
+            query?: {
+                /** @description As 2026-03, by UTC; this month when absent. */
+                month?: string;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            /** @description OK */
+            200: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["OwnUsage"];
+                };
+            };
+            /** @description Unauthorized. Codes: missing-key, invalid-key, revoked-key, expired-key, not-signed-in, wrong-credentials. */
+            401: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Unprocessable Entity. Codes: unknown-preset, unknown-interface, missing-facet, unknown-facet, invalid-facet, missing-field, unknown-field, invalid-field, count-mismatch, not-a-number, not-finite, zero-norm, not-a-rotation, improper-axes, unrelated-frames, not-representable, invalid-convention. */
+            422: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Too Many Requests. Codes: too-many-requests, too-many-parallel, quota-exceeded. */
+            429: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Internal Server Error. Codes: internal, cross-check-failed. */
+            500: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Service Unavailable. Codes: not-recorded. */
+            503: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    usageByKey: {
+        parameters: {
+            query?: {
+                /** @description As 2026-03, by UTC; this month when absent. */
+                month?: string;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            /** @description OK */
+            200: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["UsageByKey"];
+                };
+            };
+            /** @description Unauthorized. Codes: missing-key, invalid-key, revoked-key, expired-key, not-signed-in, wrong-credentials. */
+            401: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Forbidden. Codes: not-allowed, cross-site. */
+            403: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Unprocessable Entity. Codes: unknown-preset, unknown-interface, missing-facet, unknown-facet, invalid-facet, missing-field, unknown-field, invalid-field, count-mismatch, not-a-number, not-finite, zero-norm, not-a-rotation, improper-axes, unrelated-frames, not-representable, invalid-convention. */
+            422: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Too Many Requests. Codes: too-many-requests, too-many-parallel, quota-exceeded. */
+            429: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Internal Server Error. Codes: internal, cross-check-failed. */
+            500: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Service Unavailable. Codes: not-recorded. */
+            503: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    listLimits: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            /** @description OK */
+            200: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        items: components["schemas"]["RoleLimits"][];
+                    };
+                };
+            };
+            /** @description Unauthorized. Codes: missing-key, invalid-key, revoked-key, expired-key, not-signed-in, wrong-credentials. */
+            401: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Forbidden. Codes: not-allowed, cross-site. */
+            403: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Too Many Requests. Codes: too-many-requests, too-many-parallel, quota-exceeded. */
+            429: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Internal Server Error. Codes: internal, cross-check-failed. */
+            500: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Service Unavailable. Codes: not-recorded. */
+            503: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    changeLimits: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                role: components["schemas"]["Role"];
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["Limits"];
+            };
+        };
+        responses: {
+            /** @description OK */
+            200: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["RoleLimits"];
+                };
+            };
+            /** @description Bad Request. Codes: malformed-json, malformed-request, invalid-cursor. */
+            400: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Unauthorized. Codes: missing-key, invalid-key, revoked-key, expired-key, not-signed-in, wrong-credentials. */
+            401: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Forbidden. Codes: not-allowed, cross-site. */
+            403: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Payload Too Large. Codes: body-too-large, batch-too-large. */
+            413: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Unsupported Media Type. Codes: unsupported-media-type, unsupported-encoding. */
+            415: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Unprocessable Entity. Codes: unknown-preset, unknown-interface, missing-facet, unknown-facet, invalid-facet, missing-field, unknown-field, invalid-field, count-mismatch, not-a-number, not-finite, zero-norm, not-a-rotation, improper-axes, unrelated-frames, not-representable, invalid-convention. */
+            422: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Too Many Requests. Codes: too-many-requests, too-many-parallel, quota-exceeded. */
+            429: {
                 headers: {
                     /** @description The id of this call in the history. */
                     "X-Request-Id"?: string;
@@ -1544,7 +2306,7 @@ export interface operations {
                     "application/problem+json": components["schemas"]["Problem"];
                 };
             };
-            /** @description Too Many Requests. Codes: too-many-requests. */
+            /** @description Too Many Requests. Codes: too-many-requests, too-many-parallel, quota-exceeded. */
             429: {
                 headers: {
                     /** @description The id of this call in the history. */
@@ -1645,6 +2407,17 @@ export interface operations {
             };
             /** @description Forbidden. Codes: not-allowed, cross-site. */
             403: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Too Many Requests. Codes: too-many-requests, too-many-parallel, quota-exceeded. */
+            429: {
                 headers: {
                     /** @description The id of this call in the history. */
                     "X-Request-Id"?: string;
