@@ -6,6 +6,7 @@ import { CrossChecker } from './cross-check/cross-checker.ts';
 import { connect, disconnect, type Database } from './db/database.ts';
 import { apiKeysRepository } from './db/repositories/api-keys.ts';
 import { limitsRepository } from './db/repositories/limits.ts';
+import { runsRepository } from './db/repositories/runs.ts';
 import { usageRepository } from './db/repositories/usage.ts';
 import { historyRepository } from './db/repositories/history.ts';
 import { peopleRepository } from './db/repositories/people.ts';
@@ -38,6 +39,7 @@ export async function createServices({ config, logger, clock = Date.now }: Servi
     sessions: sessionsRepository(database),
     history: historyRepository(database),
     usage,
+    runs: runsRepository(database),
     limits: await LimitTable.load(limitsRepository(database)),
     quota: new Quota(usage, clock),
     parallel: new ParallelCalls(),

@@ -5,7 +5,7 @@ import { defineApiKey, type ApiKeyModel } from './models/api-key.ts';
 import { definePerson, type PersonModel } from './models/person.ts';
 import { defineRequest, type RequestModel } from './models/request.ts';
 import { defineSession, type SessionModel } from './models/session.ts';
-import { storeRequests, type NewRequest } from './repositories/store-requests.ts';
+import { storeRecords, type NewRecord } from './repositories/store-records.ts';
 import { WriteQueue } from './write-queue.ts';
 
 /** The open database: models for reading, one queue for writing. */
@@ -15,7 +15,7 @@ export interface Database {
   readonly sessions: SessionModel;
   readonly apiKeys: ApiKeyModel;
   readonly requests: RequestModel;
-  readonly writes: WriteQueue<NewRequest>;
+  readonly writes: WriteQueue<NewRecord>;
 }
 
 /** Opens the file and brings its schema up to date. */
@@ -28,7 +28,7 @@ export async function connect(file: string): Promise<Database> {
     sessions: defineSession(sequelize),
     apiKeys: defineApiKey(sequelize),
     requests: defineRequest(sequelize),
-    writes: new WriteQueue(sequelize, (rows, transaction) => storeRequests(sequelize, rows, transaction)),
+    writes: new WriteQueue(sequelize, (rows, transaction) => storeRecords(sequelize, rows, transaction)),
   };
 }
 

@@ -1,6 +1,7 @@
 import type { Sequelize } from 'sequelize';
 import { SequelizeStorage, Umzug } from 'umzug';
 import { firstTables } from './migrations/0001-first-tables.ts';
+import { runs } from './migrations/0003-runs.ts';
 import { limitsAndUsage } from './migrations/0002-limits-and-usage.ts';
 
 /** One step of the schema, in raw SQL: Sequelize's own column changes rebuild a table and lose its cascade children. */
@@ -9,7 +10,7 @@ export interface Migration {
   readonly statements: readonly string[];
 }
 
-const MIGRATIONS: readonly Migration[] = [firstTables, limitsAndUsage];
+const MIGRATIONS: readonly Migration[] = [firstTables, limitsAndUsage, runs];
 
 /** Brings the schema up to date; returns the names of the steps it took. */
 export async function migrate(sequelize: Sequelize): Promise<string[]> {

@@ -10,6 +10,7 @@ import { healthRoutes } from './routes/health.ts';
 import { historyRoutes } from './routes/history.ts';
 import { keyRoutes } from './routes/keys.ts';
 import { sessionRoutes } from './routes/sessions.ts';
+import { runRoutes } from './routes/runs.ts';
 import { usageRoutes } from './routes/usage.ts';
 import { contentSecurityPolicy } from './security-policy.ts';
 import { mountUnmatched } from './unmatched.ts';
@@ -27,7 +28,7 @@ export function createApp(services: Services): Express {
     response.setHeader('Cache-Control', 'no-store');
     next();
   });
-  for (const mountRoutes of [attitudeRoutes, conventionRoutes, keyRoutes, historyRoutes, usageRoutes, sessionRoutes, healthRoutes]) mountRoutes(services, api);
+  for (const mountRoutes of [attitudeRoutes, conventionRoutes, keyRoutes, historyRoutes, runRoutes, usageRoutes, sessionRoutes, healthRoutes]) mountRoutes(services, api);
   mountUnmatched(services, api);
   app.use(BASE_PATH, api);
 

@@ -42,12 +42,13 @@ export function mount<E extends Endpoint>(services: Services, router: Router, en
         admission = await admit(services, call);
         const input = await parseInput(endpoint, call);
         const answer = await handler(input as Input<E>);
-        const text = answer === undefined ? undefined : JSON.stringify(answer);
+        const { contentType } = endpoint;
+        const text = answer === undefined ? undefined : contentType === undefined ? JSON.stringify(answer) : String(answer);
         if (recorded(endpoint, call)) await record(services, call, route, endpoint.status, null);
         answered = true;
         response.status(endpoint.status);
         if (text === undefined) response.end();
-        else response.type('application/json').send(text);
+        else response.type(contentType ?? 'application/json').send(text);
       } catch (error) {
         await refuse(services, call, route, error);
       } finally {

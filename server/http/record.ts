@@ -5,7 +5,7 @@ import type { Call } from './call.ts';
 export function record({ history }: Services, call: Call, route: string, status: number, code: string | null): Promise<void> {
   const { caller, meter } = call;
   const refused = status >= 400;
-  return history.append({
+  const row = {
     requestId: call.id,
     at: call.startedAt,
     keyId: caller?.keyId ?? null,
@@ -19,5 +19,8 @@ export function record({ history }: Services, call: Call, route: string, status:
     attitudes: refused ? 0 : meter.attitudes,
     warnings: refused ? 0 : meter.warnings,
     warningCodes: refused ? '' : meter.warningCodes.join(','),
+  };
+  return history.append(row, refused || !call.run ? null : {
+    ...call.run, detail: JSON.stringify(call.run.detail), at: row.at, requestId: row.requestId, keyId: row.keyId, personId: row.personId, ownerId: row.ownerId!,
   });
 }

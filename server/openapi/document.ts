@@ -68,7 +68,7 @@ function responsesOf(endpoint: Endpoint, schemas: SchemaCollection): Record<stri
   const success = {
     description: STATUS_CODES[endpoint.status],
     headers: requestIdHeader,
-    ...(endpoint.response ? { content: { 'application/json': { schema: schemas.of(endpoint.response, 'output') } } } : {}),
+    ...(endpoint.response ? { content: { [endpoint.contentType ?? 'application/json']: { schema: schemas.of(endpoint.response, 'output') } } } : {}),
   };
   const refusals = [...endpoint.problems, 500].map((status) => [String(status), {
     description: `${STATUS_CODES[status]}. Codes: ${codesWith(status)}.`,

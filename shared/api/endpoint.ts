@@ -15,7 +15,7 @@ export interface Endpoint<
   readonly method: 'get' | 'post' | 'put' | 'patch' | 'delete';
   /** Below the base path, parameters in braces as in OpenAPI. */
   readonly path: string;
-  readonly tag: 'Attitude' | 'Conventions' | 'Keys' | 'History' | 'Usage' | 'Session' | 'Health';
+  readonly tag: 'Attitude' | 'Conventions' | 'Runs' | 'Keys' | 'History' | 'Usage' | 'Session' | 'Health';
   readonly summary: string;
   readonly description?: string;
   /** `public` needs nothing; `visitor` takes a session where there is one; `caller` needs an API key or a session; `session` a person signed in to the console. */
@@ -27,6 +27,8 @@ export interface Endpoint<
   readonly status: 200 | 201 | 204;
   /** What the answer holds; absent where it has no body. */
   readonly response?: Response;
+  /** Of the answer; JSON when absent. Then `response` is the text itself. */
+  readonly contentType?: string;
   readonly problems: readonly number[];
   /**
    * Whether calls by a signed-in person count as API calls and are kept in the history. Calls with an API key,

@@ -5,6 +5,7 @@ import { healthEndpoint } from './health.ts';
 import { listHistoryEndpoint } from './history.ts';
 import { issueKeyEndpoint, listKeysEndpoint, revokeKeyEndpoint } from './keys.ts';
 import { ratesEndpoint } from './rates.ts';
+import { getRunEndpoint, getRunJUnitEndpoint, listRunsEndpoint, verifyEndpoint } from './runs.ts';
 import { currentSessionEndpoint, signInEndpoint, signOutEndpoint } from './sessions.ts';
 import { changeKeyLimitsEndpoint, changeLimitsEndpoint, listLimitsEndpoint, ownUsageEndpoint, usageByKeyEndpoint } from './usage.ts';
 
@@ -12,6 +13,10 @@ import { changeKeyLimitsEndpoint, changeLimitsEndpoint, listLimitsEndpoint, ownU
 export const ENDPOINTS: readonly Endpoint[] = [
   convertEndpoint,
   ratesEndpoint,
+  verifyEndpoint,
+  listRunsEndpoint,
+  getRunJUnitEndpoint,
+  getRunEndpoint,
   listConventionsEndpoint,
   getConventionEndpoint,
   listKeysEndpoint,

@@ -1,6 +1,7 @@
 import type { Database } from '../database.ts';
 import type { RequestRow } from '../models/request.ts';
 import { select } from '../select.ts';
+import type { NewRun } from './runs.ts';
 import type { NewRequest } from './store-requests.ts';
 
 export interface HistoryFilter {
@@ -21,7 +22,7 @@ export type HistoryRow = RequestRow & { keyName: string | null; keyPrefix: strin
 
 export interface HistoryRepository {
   /** Resolves once the row is committed. */
-  append(row: NewRequest): Promise<void>;
+  append(request: NewRequest, run: NewRun | null): Promise<void>;
   /** Newest first. */
   page(filter: HistoryFilter): Promise<HistoryRow[]>;
   routes(ownerId: string | null): Promise<string[]>;
@@ -29,7 +30,7 @@ export interface HistoryRepository {
 
 export function historyRepository({ sequelize, writes }: Database): HistoryRepository {
   return {
-    append: (row) => writes.append(row),
+    append: (request, run) => writes.append({ request, run }),
     page: (filter) => {
       const { where, values } = conditionsOf(filter);
       return select<HistoryRow>(sequelize, `

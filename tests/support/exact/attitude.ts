@@ -150,13 +150,17 @@ export class ExactAttitude {
     return q.map((entry) => sign * f.div(entry, norm));
   }
 
+  /** The exact attitude between the target's axes; a given matrix as it stands where it is clean and goes to a matrix or angles. */
+  rotation(from: Convention, to: Convention, numbers: readonly number[]): Matrix {
+    const meaning = this.meaning(from, numbers);
+    const asGiven = !meaning.given || (this.#isClean(meaning.matrix) && (to.representation === 'euler' || to.representation === 'dcm'));
+    return this.relabelled(asGiven ? meaning.matrix : this.nearest(meaning.matrix), from, to);
+  }
+
   /** The exact answer in the target's numbers. `sign` "continuous" is taken as "any"; at lock, null. */
   convert(from: Convention, to: Convention, numbers: readonly number[]): bigint[] | null {
     const { f } = this;
-    const meaning = this.meaning(from, numbers);
-    const clean = !meaning.given || this.#isClean(meaning.matrix);
-    const rotation = clean && (to.representation === 'euler' || to.representation === 'dcm') ? meaning.matrix : meaning.given ? this.nearest(meaning.matrix) : meaning.matrix;
-    const matrix = this.relabelled(rotation, from, to);
+    const matrix = this.rotation(from, to, numbers);
     const transposed = (maps: 'body-to-reference' | 'reference-to-body'): Matrix => (maps === 'body-to-reference' ? matrix : transpose(matrix));
     switch (to.representation) {
       case 'dcm': {

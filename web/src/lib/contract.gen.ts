@@ -44,6 +44,88 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/verify": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /**
+         * Verify attitudes that code computed against expected ones
+         * @description The error is the angle of the rotation between the two attitudes, never a difference of angles. The verdict is kept as a run.
+         *
+         *     Roles: administrator, integrator, engineer.
+         */
+        post: operations["verifyAttitudes"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/runs": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /**
+         * Runs, newest first
+         * @description Roles: administrator, integrator, engineer (their own), reviewer.
+         */
+        get: operations["listRuns"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/runs/{id}.junit.xml": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /**
+         * One run as JUnit XML, for a build’s test report
+         * @description Roles: administrator, integrator, engineer (their own), reviewer.
+         */
+        get: operations["getRunAsJUnit"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/runs/{id}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /**
+         * One run
+         * @description Roles: administrator, integrator, engineer (their own), reviewer.
+         */
+        get: operations["getRun"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/conventions": {
         parameters: {
             query?: never;
@@ -554,6 +636,15 @@ export interface components {
                 maxAngleRad: number;
             }[];
         };
+        /** @description Of the error angles; percentiles by nearest rank. */
+        ErrorStatistics: {
+            rms: number;
+            median: number;
+            p95: number;
+            max: number;
+            /** @enum {string} */
+            unit: "deg" | "rad" | "arcsec";
+        };
         HistoryEntry: {
             /** @description The request id, as in the X-Request-Id header of the answer. */
             id: string;
@@ -730,12 +821,51 @@ export interface components {
             attitudesPerCall: number;
             parallelRequests: number;
         };
+        Run: {
+            id: string;
+            /**
+             * Format: date-time
+             * @example 2026-05-04T08:30:00.000Z
+             */
+            at: string;
+            /** @enum {string} */
+            verdict: "pass" | "fail";
+            label: string | null;
+            commit: string | null;
+            key: {
+                id: string;
+                name: string;
+            } | null;
+            person: {
+                id: string;
+                name: string;
+            } | null;
+            count: number;
+            failed: number;
+            tolerance: components["schemas"]["Tolerance"];
+            worst: components["schemas"]["WorstError"];
+            statistics: components["schemas"]["ErrorStatistics"];
+            expected: components["schemas"]["ConventionFacets"];
+            actual: components["schemas"]["ConventionFacets"];
+            /** @description The first 100 attitudes off by more than the tolerance, with the angle in its unit. */
+            failures: {
+                index: number;
+                angle: number;
+            }[];
+            summary: string;
+            engine: string;
+        };
         SignInInput: {
             email: string;
             password: string;
         };
         SignedIn: {
             person: components["schemas"]["Person"];
+        };
+        Tolerance: {
+            angle: number;
+            /** @enum {string} */
+            unit: "deg" | "rad" | "arcsec";
         };
         UsageByKey: {
             month: string;
@@ -753,6 +883,41 @@ export interface components {
                 requests: number;
                 attitudes: number;
             }[];
+        };
+        VerifyInput: {
+            expected: {
+                convention: components["schemas"]["Convention"];
+                /** @description One array of numbers per attitude, in the count and order that the convention states. A row-major matrix may also stand as three rows of three. */
+                attitudes: (number | number[])[][];
+            };
+            actual: {
+                convention: components["schemas"]["Convention"];
+                /** @description One array of numbers per attitude, in the count and order that the convention states. A row-major matrix may also stand as three rows of three. */
+                attitudes: (number | number[])[][];
+            };
+            tolerance: components["schemas"]["Tolerance"];
+            /** @description What was checked; runs can be found by it. */
+            label?: string;
+            /** @description The commit of the code that computed the actual attitudes. */
+            commit?: string;
+        };
+        VerifyOutput: {
+            /** @enum {string} */
+            verdict: "pass" | "fail";
+            /** @description Id of the stored run. */
+            run: string;
+            count: number;
+            failed: number;
+            worst: components["schemas"]["WorstError"];
+            statistics: components["schemas"]["ErrorStatistics"];
+            /** @description The first 100 attitudes off by more than the tolerance, with the angle in its unit. */
+            failures: {
+                index: number;
+                angle: number;
+            }[];
+            /** @description The worst error in a plain sentence. */
+            summary: string;
+            engine: string;
         };
         Warning: {
             /** @enum {string} */
@@ -781,6 +946,18 @@ export interface components {
             };
             /** @description Norm defect of a quaternion or orthogonality defect of a matrix that was repaired. */
             defect?: number;
+        };
+        WorstError: {
+            index: number;
+            angle: number;
+            /** @enum {string} */
+            unit: "deg" | "rad" | "arcsec";
+            /** @description Unit axis in forward, right, down: the rotation by the angle about it carries the expected attitude into the actual one. */
+            axisBody: [
+                number,
+                number,
+                number
+            ];
         };
         /** @description What was wrong (RFC 9457). `code` is stable; branch on it. */
         Problem: {
@@ -1063,6 +1240,456 @@ export interface operations {
             };
             /** @description Unprocessable Entity. Codes: unknown-preset, unknown-interface, missing-facet, unknown-facet, invalid-facet, missing-field, unknown-field, invalid-field, count-mismatch, not-a-number, not-finite, zero-norm, not-a-rotation, improper-axes, unrelated-frames, not-representable, invalid-convention. */
             422: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Too Many Requests. Codes: too-many-requests, too-many-parallel, quota-exceeded. */
+            429: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Internal Server Error. Codes: internal, cross-check-failed. */
+            500: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Service Unavailable. Codes: not-recorded. */
+            503: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    verifyAttitudes: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                /**
+                 * @example {
+                 *       "expected": {
+                 *         "convention": {
+                 *           "preset": "aircraft-euler-deg"
+                 *         },
+                 *         "attitudes": [
+                 *           [
+                 *             30,
+                 *             10,
+                 *             20
+                 *           ]
+                 *         ]
+                 *       },
+                 *       "actual": {
+                 *         "convention": {
+                 *           "preset": "aircraft-quaternion"
+                 *         },
+                 *         "attitudes": [
+                 *           [
+                 *             0.9515,
+                 *             0.1449,
+                 *             0.1277,
+                 *             0.2393
+                 *           ]
+                 *         ]
+                 *       },
+                 *       "tolerance": {
+                 *         "angle": 0.05,
+                 *         "unit": "deg"
+                 *       },
+                 *       "label": "Autopilot attitude",
+                 *       "commit": "4f9d2c1"
+                 *     }
+                 */
+                "application/json": components["schemas"]["VerifyInput"];
+            };
+        };
+        responses: {
+            /** @description OK */
+            200: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["VerifyOutput"];
+                };
+            };
+            /** @description Bad Request. Codes: malformed-json, malformed-request, invalid-cursor. */
+            400: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Unauthorized. Codes: missing-key, invalid-key, revoked-key, expired-key, not-signed-in, wrong-credentials. */
+            401: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Forbidden. Codes: not-allowed, cross-site. */
+            403: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Payload Too Large. Codes: body-too-large, batch-too-large. */
+            413: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Unsupported Media Type. Codes: unsupported-media-type, unsupported-encoding. */
+            415: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Unprocessable Entity. Codes: unknown-preset, unknown-interface, missing-facet, unknown-facet, invalid-facet, missing-field, unknown-field, invalid-field, count-mismatch, not-a-number, not-finite, zero-norm, not-a-rotation, improper-axes, unrelated-frames, not-representable, invalid-convention. */
+            422: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Too Many Requests. Codes: too-many-requests, too-many-parallel, quota-exceeded. */
+            429: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Internal Server Error. Codes: internal, cross-check-failed. */
+            500: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Service Unavailable. Codes: not-recorded. */
+            503: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    listRuns: {
+        parameters: {
+            query?: {
+                /** @description As given by the page before. */
+                cursor?: string;
+                /** @description Rows a page, 1 to 200; 50 when absent. */
+                limit?: string;
+                verdict?: "pass" | "fail";
+                label?: string;
+                key?: string;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            /** @description OK */
+            200: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        items: components["schemas"]["Run"][];
+                        nextCursor: string | null;
+                    };
+                };
+            };
+            /** @description Bad Request. Codes: malformed-json, malformed-request, invalid-cursor. */
+            400: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Unauthorized. Codes: missing-key, invalid-key, revoked-key, expired-key, not-signed-in, wrong-credentials. */
+            401: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Forbidden. Codes: not-allowed, cross-site. */
+            403: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Unprocessable Entity. Codes: unknown-preset, unknown-interface, missing-facet, unknown-facet, invalid-facet, missing-field, unknown-field, invalid-field, count-mismatch, not-a-number, not-finite, zero-norm, not-a-rotation, improper-axes, unrelated-frames, not-representable, invalid-convention. */
+            422: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Too Many Requests. Codes: too-many-requests, too-many-parallel, quota-exceeded. */
+            429: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Internal Server Error. Codes: internal, cross-check-failed. */
+            500: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Service Unavailable. Codes: not-recorded. */
+            503: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    getRunAsJUnit: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            /** @description OK */
+            200: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/xml": string;
+                };
+            };
+            /** @description Unauthorized. Codes: missing-key, invalid-key, revoked-key, expired-key, not-signed-in, wrong-credentials. */
+            401: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Forbidden. Codes: not-allowed, cross-site. */
+            403: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Not Found. Codes: unknown-route, not-found. */
+            404: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Too Many Requests. Codes: too-many-requests, too-many-parallel, quota-exceeded. */
+            429: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Internal Server Error. Codes: internal, cross-check-failed. */
+            500: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Service Unavailable. Codes: not-recorded. */
+            503: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    getRun: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            /** @description OK */
+            200: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["Run"];
+                };
+            };
+            /** @description Unauthorized. Codes: missing-key, invalid-key, revoked-key, expired-key, not-signed-in, wrong-credentials. */
+            401: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Forbidden. Codes: not-allowed, cross-site. */
+            403: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Not Found. Codes: unknown-route, not-found. */
+            404: {
                 headers: {
                     /** @description The id of this call in the history. */
                     "X-Request-Id"?: string;

@@ -1,0 +1,67 @@
+import { randomUUID } from 'node:crypto';
+import type { VerifyInput, VerifyOutput } from '#shared/api/runs.ts';
+import { LISTED_AT_MOST } from '#shared/attitude/errors.ts';
+import type { Convention } from '#shared/attitude/convention.ts';
+import { errorSentence } from '#shared/attitude/verification/error-sentence.ts';
+import { verifyAttitudes, type StatedAttitudes, type Verification } from '#shared/attitude/verification/verify-attitudes.ts';
+import { ENGINE } from '../attitude/engine.ts';
+import { readAttitudes } from '../attitude/read-attitudes.ts';
+import { pointingInto } from '../attitude/refuse-attitudes.ts';
+import { resolveConvention } from '../conventions/resolve-convention.ts';
+import { DomainError } from '../errors.ts';
+import type { Meter } from '../meter.ts';
+import type { RunDetail } from './present-run.ts';
+
+const PER_RADIAN = { rad: 1, deg: 180 / Math.PI, arcsec: (180 * 3600) / Math.PI } as const;
+
+/** What a verification leaves behind, for the run that is stored with its record. */
+export interface VerifiedRun {
+  readonly id: string;
+  readonly label: string | null;
+  readonly commitId: string | null;
+  readonly verdict: 'pass' | 'fail';
+  readonly count: number;
+  readonly failed: number;
+  readonly detail: RunDetail;
+}
+
+/** Compares expected and actual attitudes; the run is stored by whoever records the call. */
+export function verify(request: VerifyInput, meter: Meter): { answer: VerifyOutput; run: VerifiedRun } {
+  if (request.expected.attitudes.length !== request.actual.attitudes.length) {
+    throw new DomainError('count-mismatch', `${request.expected.attitudes.length} expected attitudes cannot be compared with ${request.actual.attitudes.length} actual ones.`, [{ pointer: '/actual/attitudes', message: `must hold as many attitudes as /expected/attitudes, ${request.expected.attitudes.length}` }]);
+  }
+  meter.spend(request.actual.attitudes.length, '/actual/attitudes');
+  const expected = read(request.expected, '/expected');
+  const actual = read(request.actual, '/actual');
+  const { tolerance } = request;
+  const scale = PER_RADIAN[tolerance.unit];
+  const result = pointingInto('/actual/attitudes', () => verifyAttitudes(expected, actual, tolerance.angle / scale));
+
+  const detail = detailOf(result, tolerance, scale, expected.convention, actual.convention);
+  const run: VerifiedRun = {
+    id: randomUUID(), label: request.label ?? null, commitId: request.commit ?? null,
+    verdict: result.failed > 0 ? 'fail' : 'pass', count: result.count, failed: result.failed, detail,
+  };
+  const { worst, statistics, failures, summary, engine } = detail;
+  return { run, answer: { verdict: run.verdict, run: run.id, count: run.count, failed: run.failed, worst: { ...worst, axisBody: [...worst.axisBody] }, statistics, failures: [...failures], summary, engine } };
+}
+
+function read({ convention: reference, attitudes }: VerifyInput['expected'], pointer: string): StatedAttitudes {
+  const convention = resolveConvention(reference, `${pointer}/convention`);
+  return { convention, numbers: readAttitudes(attitudes, convention, `${pointer}/attitudes`) };
+}
+
+function detailOf({ angles, worst, statistics }: Verification, tolerance: VerifyInput['tolerance'], scale: number, expected: Convention, actual: Convention): RunDetail {
+  const { unit } = tolerance;
+  const failures: { index: number; angle: number }[] = [];
+  for (let index = 0; index < angles.length && failures.length < LISTED_AT_MOST; index++) {
+    if (angles[index]! > tolerance.angle / scale) failures.push({ index, angle: angles[index]! * scale });
+  }
+  return {
+    expected, actual, tolerance, failures,
+    worst: { index: worst.index, angle: worst.angle * scale, unit, axisBody: worst.axisBody },
+    statistics: { rms: statistics.rms * scale, median: statistics.median * scale, p95: statistics.p95 * scale, max: statistics.max * scale, unit },
+    summary: `Worst at attitude ${worst.index}: ${errorSentence(worst.angle * scale, unit, worst.axisBody)}`,
+    engine: ENGINE,
+  };
+}

@@ -1,0 +1,75 @@
+import { z } from 'zod';
+import { pageQuery, timestamp } from './common.ts';
+import { conventionFacets, conventionReference } from './convention.ts';
+import { endpoint } from './endpoint.ts';
+import { attitudeRows } from './numbers.ts';
+
+const toleranceUnit = z.enum(['deg', 'rad', 'arcsec']);
+const tolerance = z.strictObject({
+  angle: z.number({ error: 'must be a number greater than 0' }).positive({ error: 'must be greater than 0' }), unit: toleranceUnit,
+}).meta({ id: 'Tolerance' });
+const verdict = z.enum(['pass', 'fail']);
+const worst = z.strictObject({
+  index: z.int().nonnegative(), angle: z.number(), unit: toleranceUnit,
+  axisBody: z.tuple([z.number(), z.number(), z.number()]).meta({ description: 'Unit axis in forward, right, down: the rotation by the angle about it carries the expected attitude into the actual one.' }),
+}).meta({ id: 'WorstError' });
+const statistics = z.strictObject({ rms: z.number(), median: z.number(), p95: z.number(), max: z.number(), unit: toleranceUnit }).meta({ id: 'ErrorStatistics', description: 'Of the error angles; percentiles by nearest rank.' });
+const failures = z.array(z.strictObject({ index: z.int().nonnegative(), angle: z.number() })).max(100).meta({ description: 'The first 100 attitudes off by more than the tolerance, with the angle in its unit.' });
+
+const label = z.string().trim().min(1, { error: 'must not be empty' }).max(120, { error: 'must have at most 120 characters' });
+const commit = z.string().regex(/^[0-9a-fA-F]{4,64}$/, { error: 'must be a commit id: 4 to 64 hexadecimal digits' });
+const listed = z.strictObject({ convention: conventionReference, attitudes: attitudeRows });
+
+export const verifyInput = z.strictObject({
+  expected: listed, actual: listed, tolerance,
+  label: label.optional().meta({ description: 'What was checked; runs can be found by it.' }),
+  commit: commit.optional().meta({ description: 'The commit of the code that computed the actual attitudes.' }),
+}).meta({ id: 'VerifyInput' });
+
+export const verifyOutput = z.strictObject({
+  verdict, run: z.string().meta({ description: 'Id of the stored run.' }), count: z.int(), failed: z.int(), worst, statistics, failures,
+  summary: z.string().meta({ description: 'The worst error in a plain sentence.' }), engine: z.string(),
+}).meta({ id: 'VerifyOutput' });
+
+export const verifyEndpoint = endpoint({
+  id: 'verifyAttitudes', method: 'post', path: '/verify', tag: 'Attitude',
+  summary: 'Verify attitudes that code computed against expected ones',
+  description: 'The error is the angle of the rotation between the two attitudes, never a difference of angles. The verdict is kept as a run.',
+  auth: 'caller', permission: 'attitude.compute', recordsSessions: true,
+  body: verifyInput, status: 200, response: verifyOutput, problems: [400, 401, 403, 413, 415, 422, 429, 503],
+  example: {
+    expected: { convention: { preset: 'aircraft-euler-deg' }, attitudes: [[30, 10, 20]] },
+    actual: { convention: { preset: 'aircraft-quaternion' }, attitudes: [[0.9515, 0.1449, 0.1277, 0.2393]] },
+    tolerance: { angle: 0.05, unit: 'deg' }, label: 'Autopilot attitude', commit: '4f9d2c1',
+  },
+});
+
+export const run = z.strictObject({
+  id: z.string(), at: timestamp, verdict, label: z.string().nullable(), commit: z.string().nullable(),
+  key: z.strictObject({ id: z.string(), name: z.string() }).nullable(), person: z.strictObject({ id: z.string(), name: z.string() }).nullable(),
+  count: z.int(), failed: z.int(), tolerance, worst, statistics,
+  expected: conventionFacets, actual: conventionFacets, failures, summary: z.string(), engine: z.string(),
+}).meta({ id: 'Run' });
+
+export const listRunsEndpoint = endpoint({
+  id: 'listRuns', method: 'get', path: '/runs', tag: 'Runs', summary: 'Runs, newest first',
+  auth: 'caller', permission: 'runs.read',
+  query: z.strictObject({ ...pageQuery, verdict: verdict.optional(), label: z.string().max(120).optional(), key: z.string().optional() }),
+  status: 200, response: z.strictObject({ items: z.array(run), nextCursor: z.string().nullable() }), problems: [400, 401, 403, 422, 429, 503],
+});
+
+const byId = z.strictObject({ id: z.string() });
+
+export const getRunJUnitEndpoint = endpoint({
+  id: 'getRunAsJUnit', method: 'get', path: '/runs/{id}.junit.xml', tag: 'Runs', summary: 'One run as JUnit XML, for a build’s test report',
+  auth: 'caller', permission: 'runs.read', params: byId, status: 200, response: z.string(), contentType: 'application/xml', problems: [401, 403, 404, 429, 503],
+});
+
+export const getRunEndpoint = endpoint({
+  id: 'getRun', method: 'get', path: '/runs/{id}', tag: 'Runs', summary: 'One run',
+  auth: 'caller', permission: 'runs.read', params: byId, status: 200, response: run, problems: [401, 403, 404, 429, 503],
+});
+
+export type VerifyInput = z.output<typeof verifyInput>;
+export type VerifyOutput = z.output<typeof verifyOutput>;
+export type RunDocument = z.output<typeof run>;
