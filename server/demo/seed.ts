@@ -3,10 +3,10 @@ import { insertSeed } from '#server/db/repositories/seed.ts';
 import type { ApiKeyRow } from '#server/db/models/api-key.ts';
 import { hashPassword } from '#server/domain/people/password.ts';
 import { newSecret } from '#server/domain/keys/secret.ts';
-import { pastCalls } from '#server/scenario/history.ts';
 import { KEYS, PEOPLE } from '#server/scenario/programme.ts';
 import type { Services } from '../services.ts';
 import { readDemoFile, writeDemoFile } from './demo-file.ts';
+import { pastRecords } from './past-records.ts';
 
 const DAY = 86_400_000;
 
@@ -38,14 +38,10 @@ export async function seedDemo({ people, database, config, clock }: Services): P
     revokedAt: key.revokedDaysAgo === undefined ? null : now - key.revokedDaysAgo * DAY,
     lastUsedAt: null, requestsPerMinute: null, attitudesPerMonth: null, attitudesPerCall: null, parallelRequests: null,
   }));
-  const keyByName = new Map(apiKeys.map((key) => [key.name, key]));
   await insertSeed(database, {
     people: await Promise.all(accounts.map(async ({ id, name, email, role, password }) => ({ id, name, email, role, passwordHash: await hashPassword(password), createdAt: now - 45 * DAY, deactivatedAt: null }))),
     apiKeys,
-    requests: pastCalls(now).map(({ key, warningCodes, ...call }) => {
-      const row = key === null ? undefined : keyByName.get(key);
-      return { ...call, requestId: randomUUID(), keyId: row?.id ?? null, personId: null, ownerId: row?.ownerId ?? null, warningCodes: warningCodes.join(',') };
-    }),
+    records: pastRecords(now, new Map(apiKeys.map((key) => [key.name, key]))),
   });
 }
 

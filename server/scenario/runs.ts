@@ -25,6 +25,8 @@ export interface PastRun {
   readonly worst: { readonly index: number; readonly angle: number; readonly axisBody: readonly [number, number, number] };
   /** Percentiles by nearest rank. */
   readonly statistics: { readonly rms: number; readonly median: number; readonly p95: number; readonly max: number };
+  /** The first 100 samples off by more than the tolerance. */
+  readonly failures: readonly { readonly index: number; readonly angle: number }[];
   readonly durationUs: number;
 }
 
@@ -68,6 +70,7 @@ function runOf({ pipeline, commit, fault, seed }: Build, at: number, label: stri
     verdict: failed > 0 ? 'fail' : 'pass', count: angles.length, failed,
     worst: { index, angle: max, axisBody: errors[index]!.axis },
     statistics: { rms: Math.sqrt(angles.reduce((sum, angle) => sum + angle * angle, 0) / angles.length), median: rank(0.5), p95: rank(0.95), max },
+    failures: angles.flatMap((angle, i) => (angle > tolerance.angle ? [{ index: i, angle }] : [])).slice(0, 100),
     durationUs: Math.round(new SeededRandom(seed + 2).between(900, 1800) + angles.length * 3),
   };
 }

@@ -1,12 +1,12 @@
 import type { Database } from '../database.ts';
 import type { ApiKeyRow } from '../models/api-key.ts';
 import type { PersonRow } from '../models/person.ts';
-import { storeRequests, type NewRequest } from './store-requests.ts';
+import { storeRecords, type NewRecord } from './store-records.ts';
 
 export interface SeedRows {
   readonly people: readonly PersonRow[];
   readonly apiKeys: readonly ApiKeyRow[];
-  readonly requests: readonly NewRequest[];
+  readonly records: readonly NewRecord[];
 }
 
 /** Stores a whole scenario in one transaction: either all of it is there or none. */
@@ -14,6 +14,6 @@ export function insertSeed({ sequelize, people, apiKeys, writes }: Database, row
   return writes.run(async (transaction) => {
     await people.bulkCreate([...rows.people], { transaction });
     await apiKeys.bulkCreate([...rows.apiKeys], { transaction });
-    await storeRequests(sequelize, rows.requests, transaction);
+    await storeRecords(sequelize, rows.records, transaction);
   });
 }

@@ -63,9 +63,9 @@ function Index({ person }: { person: Person }) {
   const sheets = SHEETS.filter(({ roles }) => !roles || roles.includes(person.role));
   return (
     <>
-      <button type="button" className="lettering border-l border-hair px-4 py-3 lg:hidden" aria-expanded={open} aria-controls="index" onClick={() => setOpen(!open)}>Index</button>
-      <nav id="index" aria-label="Pages" className={`${open ? '' : 'hidden'} order-last w-full border-t border-hair lg:order-none lg:block lg:w-auto lg:border-t-0`}>
-        <ul className="grid grid-cols-2 sm:grid-cols-3 lg:flex lg:h-full">
+      <button type="button" className="lettering border-l border-hair px-4 py-3 xl:hidden" aria-expanded={open} aria-controls="index" onClick={() => setOpen(!open)}>Index</button>
+      <nav id="index" aria-label="Pages" className={`${open ? '' : 'hidden'} order-last w-full border-t border-hair xl:order-none xl:block xl:w-auto xl:border-t-0`}>
+        <ul className="grid grid-cols-2 sm:grid-cols-3 xl:flex xl:h-full">
           {sheets.map(({ number, path, title }) => (
             <li key={path} className="flex">
               <NavLink to={path} end={path === '/'} onClick={() => setOpen(false)}

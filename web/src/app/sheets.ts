@@ -12,10 +12,12 @@ export interface Sheet {
 export const SHEETS: readonly Sheet[] = [
   { number: '01', path: '/', title: 'Overview' },
   { number: '02', path: '/workbench', title: 'Workbench', roles: ['administrator', 'integrator', 'engineer'] },
-  { number: '03', path: '/conventions', title: 'Conventions' },
-  { number: '04', path: '/keys', title: 'Keys', roles: ['administrator', 'integrator', 'engineer'] },
-  { number: '05', path: '/history', title: 'History' },
-  { number: '06', path: '/first-call', title: 'First call' },
+  { number: '03', path: '/verify', title: 'Verify', roles: ['administrator', 'integrator', 'engineer'] },
+  { number: '04', path: '/runs', title: 'Runs' },
+  { number: '05', path: '/conventions', title: 'Conventions' },
+  { number: '06', path: '/keys', title: 'Keys', roles: ['administrator', 'integrator', 'engineer'] },
+  { number: '07', path: '/history', title: 'History' },
+  { number: '08', path: '/first-call', title: 'First call' },
 ];
 
 export function sheetAt(path: string): Sheet | undefined {

@@ -1,0 +1,59 @@
+import { useMemo, useState } from 'react';
+import { useNavigate } from 'react-router-dom';
+import { Button } from '../../components/button.tsx';
+import { SelectField, TextField } from '../../components/field.tsx';
+import { Notice, ProblemNotice } from '../../components/notice.tsx';
+import { PageHeading } from '../../components/page-heading.tsx';
+import { useVerify, type Tolerance } from '../../features/runs/api/runs.ts';
+import { RowsEditor } from '../../features/verify/components/rows-editor.tsx';
+import { parseRows } from '../../features/verify/model/parse-rows.ts';
+import { ConventionEditor } from '../../features/workbench/components/convention-editor.tsx';
+import { widthOf } from '../../features/workbench/model/compute.ts';
+import { statementOf } from '../../features/workbench/model/workbench-state.ts';
+
+export function Component() {
+  const navigate = useNavigate();
+  const verify = useVerify();
+  const [expected, setExpected] = useState({ statement: statementOf('aircraft-euler-deg'), text: '' });
+  const [actual, setActual] = useState({ statement: statementOf('aircraft-quaternion'), text: '' });
+  const [tolerance, setTolerance] = useState({ angle: '0.1', unit: 'deg' as Tolerance['unit'] });
+  const [label, setLabel] = useState('');
+  const left = useMemo(() => parseRows(expected.text, widthOf(expected.statement.convention)), [expected]);
+  const right = useMemo(() => parseRows(actual.text, widthOf(actual.statement.convention)), [actual]);
+  const within = Number(tolerance.angle);
+  const obstacle = left.error || right.error ? 'Mend the marked lines first.'
+    : left.rows.length === 0 || right.rows.length === 0 ? 'Give both the expected and the actual attitudes.'
+      : left.rows.length !== right.rows.length ? `${left.rows.length} expected attitudes cannot be compared with ${right.rows.length} actual ones.`
+        : !(within > 0) ? 'The tolerance must be greater than 0.' : null;
+
+  return (
+    <>
+      <PageHeading title="Verify">What code computed, against what it should have: the angle between the two attitudes, whatever conventions they come in. The verdict is kept as a run.</PageHeading>
+      <form className="space-y-6" onSubmit={(event) => {
+        event.preventDefault();
+        if (obstacle) return;
+        verify.mutate({
+          expected: { convention: expected.statement.convention, attitudes: left.rows }, actual: { convention: actual.statement.convention, attitudes: right.rows },
+          tolerance: { angle: within, unit: tolerance.unit }, ...(label.trim() && { label: label.trim() }),
+        }, { onSuccess: ({ run }) => navigate(`/runs/${run}`) });
+      }}>
+        <div className="grid gap-6 lg:grid-cols-2">
+          {([['Expected', expected, setExpected, left], ['Actual', actual, setActual, right]] as const).map(([name, side, set, parsed]) => (
+            <div key={name} className="space-y-4">
+              <ConventionEditor legend={name} statement={side.statement} onChange={(statement) => set({ ...side, statement })} />
+              <RowsEditor label={`${name} attitudes`} text={side.text} parsed={parsed} onChange={(text) => set({ ...side, text })} />
+            </div>
+          ))}
+        </div>
+        <div className="grid items-end gap-3 sm:grid-cols-[8rem_8rem_1fr_auto]">
+          <TextField label="Tolerance" figures inputMode="decimal" value={tolerance.angle} onChange={(event) => setTolerance({ ...tolerance, angle: event.target.value })} />
+          <SelectField label="Unit" value={tolerance.unit} onChange={(event) => setTolerance({ ...tolerance, unit: event.target.value as Tolerance['unit'] })}>{['deg', 'rad', 'arcsec'].map((unit) => <option key={unit}>{unit}</option>)}</SelectField>
+          <TextField label="Label" placeholder="what is checked" maxLength={120} value={label} onChange={(event) => setLabel(event.target.value)} />
+          <Button kind="main" type="submit" disabled={obstacle !== null} busy={verify.isPending}>Verify</Button>
+        </div>
+        {obstacle && <Notice kind="note" title={obstacle} />}
+        {verify.error && <ProblemNotice error={verify.error} />}
+      </form>
+    </>
+  );
+}
