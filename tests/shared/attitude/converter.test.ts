@@ -156,6 +156,15 @@ describe('convert', () => {
     expect(Math.min(...dots)).toBeGreaterThan(0.9);
   });
 
+  it('takes a quaternion for its direction: what leaves has norm 1, also in the convention it came in', () => {
+    const rounded = [Math.fround(0.7071068), 0, Math.fround(0.1), Math.fround(0.7)];
+    const converter = createConverter(QUATERNION, QUATERNION, { repair: 'nearest' });
+    const out = Array.from(converter.convert(Float64Array.from(rounded)));
+    expect(converter.warnings()[0]?.code).toBe('renormalised');
+    expect(Math.abs(Math.hypot(...out) - 1)).toBeLessThan(2.3e-16);
+    expect(convert(QUATERNION, QUATERNION, 0.5, -0.5, 0.5, 0.5)).toEqual([0.5, -0.5, 0.5, 0.5]);
+  });
+
   it('accepts a reflection between sets of different handedness only', () => {
     const mixed: Convention = { ...DCM, body: 'FLD' } as Convention;
     expect(convert(DCM, mixed, 1, 0, 0, 0, 1, 0, 0, 0, 1)).toEqual([1, 0, 0, 0, -1, 0, 0, 0, 1].map((value) => value + 0));
