@@ -114,8 +114,8 @@ function quaternionWriterOf(from: Convention, to: Convention, terms: 1 | 2 | 4):
   const rounded = from.representation !== 'quaternion' && from.representation !== 'gibbs' || terms === 4;
   switch (to.representation) {
     case 'quaternion': {
-      // Angles give a quaternion of norm 1 to the last double-double digit; numbers that were given have a norm of their own.
-      const unit = from.representation === 'euler' || from.representation === 'rotation-vector' || from.representation === 'axis-angle';
+      // A clean quaternion is passed on as it stands: merely listing it otherwise must not change a bit of it.
+      const unit = from.representation !== 'dcm' && from.representation !== 'mrp' && from.representation !== 'gibbs';
       return quaternionWriter(to, unit && terms === 1 ? 'keep' : 'divide', rounded);
     }
     case 'rotation-vector': return rotationVectorWriter(to.unit, rounded);

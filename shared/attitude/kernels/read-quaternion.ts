@@ -1,6 +1,7 @@
 import { scratch as S } from '../arithmetic/scratch.ts';
 import { DEFECT, QUATERNION } from '../arithmetic/slots.ts';
 import type { QuaternionConvention } from '../convention.ts';
+import { normaliseQuaternion } from './rotation.gen.ts';
 import { FINE, REFUSED, REFUSED_DEFECT, REPAIRED, REPORTED_DEFECT, type Reader } from './status.ts';
 
 /** Norm of a quaternion less one, by size; Infinity for zero, NaN for what is not finite. In plain double precision. */
@@ -13,8 +14,8 @@ export function normDefect(w: number, x: number, y: number, z: number): number {
 }
 
 /**
- * Reads a quaternion as QUATERNION, exactly: it stands for q/|q| and is never rounded to norm 1 first.
- * Norms far from 1 are brought near it by a power of two.
+ * Reads a quaternion as QUATERNION, exactly: it stands for q/|q| and is never rounded to norm 1 first. One that is
+ * repaired is left as q/|q| in double-double, so that it leaves with norm 1 in its own convention too.
  */
 export function quaternionReader(convention: QuaternionConvention, repair: 'none' | 'nearest'): Reader {
   const scalar = convention.scalar === 'first' ? 0 : 3;
@@ -29,7 +30,9 @@ export function quaternionReader(convention: QuaternionConvention, repair: 'none
     while (largest * scale > 2 ** 60) scale *= 2 ** -60;
     while (largest * scale < 2 ** -60) scale *= 2 ** 60;
     store(w * scale, x * scale, y * scale, z * scale);
-    return defect > REPORTED_DEFECT ? REPAIRED : FINE;
+    if (defect <= REPORTED_DEFECT) return FINE;
+    normaliseQuaternion();
+    return REPAIRED;
   }
 
   return (numbers, at) => {
