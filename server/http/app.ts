@@ -3,6 +3,7 @@ import helmet from 'helmet';
 import { BASE_PATH } from '#shared/api/endpoint.ts';
 import type { Services } from '../services.ts';
 import { mountConsole } from './console.ts';
+import { mountHealth } from './health-pages.ts';
 import { mountDocumentation } from './documentation.ts';
 import { attitudeRoutes } from './routes/attitude.ts';
 import { conventionRoutes } from './routes/conventions.ts';
@@ -32,6 +33,7 @@ export function createApp(services: Services): Express {
   mountUnmatched(services, api);
   app.use(BASE_PATH, api);
 
+  mountHealth(app, services);
   mountDocumentation(app);
   mountConsole(app);
   return app;

@@ -32,6 +32,18 @@ describe('what the service shows of itself', () => {
     expect(headers['cache-control']).toBe('no-store');
   });
 
+  it('says that it is alive, and whether it can write', async () => {
+    await service.call().get('/health/live').expect(200, { status: 'live' });
+    await service.call().get('/health/ready').expect(200, { status: 'ready' });
+    const closing = await startTestService();
+    await closing.services.database.writes.close();
+    await closing.call().get('/health/live').expect(200);
+    await closing.call().get('/health/ready').expect(503, { status: 'not-ready' });
+    const refused = await closing.call().get('/api/v1/conventions');
+    expect([refused.status, refused.body.code]).toEqual([503, 'not-recorded']);
+    await closing.stop();
+  });
+
   it('lists the presets, and one by its id', async () => {
     const { secret } = await service.key('engineer');
     const list = await service.call().get('/api/v1/conventions').set('Authorization', `Bearer ${secret}`).expect(200);
