@@ -23,6 +23,9 @@ describe('axis sets', () => {
   it('relate by the signed permutation that their letters say: ENU is (east, north, up)', () => {
     expect(betweenReferences('NED', 'ENU')).toEqual({ column: [1, 0, 2], sign: [1, 1, -1] });
     expect(betweenReferences('ENU', 'NED')).toEqual({ column: [1, 0, 2], sign: [1, 1, -1] });
+    // A cyclic change is not its own inverse: EDN is (east, down, north).
+    expect(betweenReferences('NED', 'EDN')).toEqual({ column: [1, 2, 0], sign: [1, 1, 1] });
+    expect(betweenReferences('EDN', 'USW')).toEqual({ column: [1, 2, 0], sign: [-1, -1, -1] });
     expect(betweenReferences('ECEF', 'ECEF')).toEqual({ column: [0, 1, 2], sign: [1, 1, 1] });
     expect(() => betweenReferences('ECEF', 'NED')).toThrow(expect.objectContaining({ code: 'unrelated-frames' }));
     expect(() => betweenReferences('ECEF', 'ICRF')).toThrow(expect.objectContaining({ code: 'unrelated-frames' }));
