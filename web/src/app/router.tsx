@@ -23,6 +23,7 @@ export const router = createBrowserRouter([
           { path: 'runs/:id', lazy: () => import('./routes/run.tsx') },
           { path: 'keys', lazy: () => import('./routes/keys.tsx') },
           { path: 'history', lazy: () => import('./routes/history.tsx') },
+          { path: 'usage', lazy: () => import('./routes/usage.tsx') },
           { path: 'first-call', lazy: () => import('./routes/first-call.tsx') },
           { path: 'problems/:code', lazy: () => import('./routes/problem.tsx') },
           { path: '*', lazy: () => import('./routes/not-found.tsx') },

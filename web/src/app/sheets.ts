@@ -17,7 +17,8 @@ export const SHEETS: readonly Sheet[] = [
   { number: '05', path: '/conventions', title: 'Conventions' },
   { number: '06', path: '/keys', title: 'Keys', roles: ['administrator', 'integrator', 'engineer'] },
   { number: '07', path: '/history', title: 'History' },
-  { number: '08', path: '/first-call', title: 'First call' },
+  { number: '08', path: '/usage', title: 'Usage' },
+  { number: '09', path: '/first-call', title: 'First call' },
 ];
 
 export function sheetAt(path: string): Sheet | undefined {
