@@ -69,12 +69,12 @@ function Index({ person }: { person: Person }) {
           {sheets.map(({ number, path, title }) => (
             <li key={path} className="flex">
               <NavLink to={path} end={path === '/'} onClick={() => setOpen(false)}
-                className={({ isActive }) => `flex grow items-center gap-1.5 border-l border-hair px-3.5 py-3 no-underline ${isActive ? 'bg-ink text-sheet hover:text-sheet' : 'hover:bg-well'}`}>
+                className={({ isActive }) => `flex grow items-center gap-1.5 border-l border-hair px-3.5 py-3 no-underline xl:px-2.5 ${isActive ? 'bg-ink text-sheet hover:text-sheet' : 'hover:bg-well'}`}>
                 <span className="figures opacity-80">{number}</span>{title}
               </NavLink>
             </li>
           ))}
-          <li className="flex"><a href="/docs/" className="flex grow items-center border-x border-hair px-3.5 py-3 no-underline hover:bg-well">API reference</a></li>
+          <li className="flex"><a href="/docs/" className="flex grow items-center border-x border-hair px-3.5 py-3 no-underline hover:bg-well xl:px-2.5">API reference</a></li>
         </ul>
       </nav>
     </>
