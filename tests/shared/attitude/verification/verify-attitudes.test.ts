@@ -35,6 +35,11 @@ describe('verifyAttitudes', () => {
     expect(errorSentence((worst.angle * 180) / Math.PI, 'deg', worst.axisBody)).toBe('2 deg about the right axis: the actual attitude is pitched up from the expected one.');
   });
 
+  it('fails what is beyond the tolerance by however little, and nothing within it', () => {
+    const verdicts = [0.099, 0.101].map((pitch) => verifyAttitudes(stated(EULER_DEG, 10, 0, 0), stated(EULER_DEG, 10, pitch, 0), (0.1 * Math.PI) / 180).failed);
+    expect(verdicts).toEqual([0, 1]);
+  });
+
   it('does not take a difference of angles for an error: near the vertical 90° of yaw against 90° of roll is none', () => {
     expect(verifyAttitudes(stated(EULER_DEG, 90, 90, 0), stated(EULER_DEG, 0, 90, -90), 1e-12).failed).toBe(0);
   });
@@ -51,6 +56,8 @@ describe('statisticsOf', () => {
     const { rms, median, p95, max } = statisticsOf(Float64Array.from({ length: 20 }, (_, i) => 20 - i));
     expect([median, p95, max]).toEqual([10, 19, 20]);
     expect(rms).toBeCloseTo(Math.sqrt((20 * 21 * 41) / 6 / 20), 12);
+    // Of seven values the median is the fourth (rank ⌈3.5⌉) and the 95th percentile the seventh (⌈6.65⌉).
+    expect(statisticsOf(Float64Array.of(7, 1, 6, 2, 5, 3, 4))).toMatchObject({ median: 4, p95: 7 });
     expect(statisticsOf(Float64Array.of(3))).toEqual({ rms: 3, median: 3, p95: 3, max: 3 });
   });
 });
