@@ -14,7 +14,7 @@ it('an integrator verifies a pasted recording, reads the verdict, and a reviewer
   await page.goto(`${demo.url}/verify`);
   await page.getByLabel('Expected attitudes', { exact: true }).fill('yaw,pitch,roll\n30,10,20\n80,-5,0\n');
   await page.getByLabel('Actual attitudes', { exact: true }).fill('1,2,3\n');
-  await page.getByText('Line 1 has 3 numbers; the convention takes 4.').waitFor();
+  await page.getByText('Each line has 3 numbers; the convention takes 4.').waitFor();
   await page.getByRole('group', { name: 'Actual' }).getByLabel('Stated by').selectOption('ros-roll-pitch-yaw');
   await page.getByLabel('Actual attitudes', { exact: true }).fill('0.3490658503988659, -0.17453292519943295, 1.0471975511965979\n0 0.05235987755982989 0.17453292519943295');
   await page.getByLabel('Label').fill('Gimbal import');

@@ -5,25 +5,25 @@ import { SelectField, TextField } from '../../components/field.tsx';
 import { Notice, ProblemNotice } from '../../components/notice.tsx';
 import { PageHeading } from '../../components/page-heading.tsx';
 import { useVerify, type Tolerance } from '../../features/runs/api/runs.ts';
-import { RowsEditor } from '../../features/verify/components/rows-editor.tsx';
-import { parseRows } from '../../features/verify/model/parse-rows.ts';
+import { RecordingEditor } from '../../features/verify/components/recording-editor.tsx';
+import { parseTable } from '../../features/verify/model/parse-table.ts';
+import { emptyRecording, readRecording, type Recording } from '../../features/verify/model/recording.ts';
 import { ConventionEditor } from '../../features/workbench/components/convention-editor.tsx';
-import { widthOf } from '../../features/workbench/model/compute.ts';
 import { statementOf } from '../../features/workbench/model/workbench-state.ts';
 
 export function Component() {
   const navigate = useNavigate();
   const verify = useVerify();
-  const [expected, setExpected] = useState({ statement: statementOf('aircraft-euler-deg'), text: '' });
-  const [actual, setActual] = useState({ statement: statementOf('aircraft-quaternion'), text: '' });
+  const [expected, setExpected] = useState(() => emptyRecording(statementOf('aircraft-euler-deg')));
+  const [actual, setActual] = useState(() => emptyRecording(statementOf('aircraft-quaternion')));
   const [tolerance, setTolerance] = useState({ angle: '0.1', unit: 'deg' as Tolerance['unit'] });
   const [label, setLabel] = useState('');
-  const left = useMemo(() => parseRows(expected.text, widthOf(expected.statement.convention)), [expected]);
-  const right = useMemo(() => parseRows(actual.text, widthOf(actual.statement.convention)), [actual]);
+  const left = useRead(expected);
+  const right = useRead(actual);
   const within = Number(tolerance.angle);
-  const obstacle = left.error || right.error ? 'Mend the marked lines first.'
-    : left.rows.length === 0 || right.rows.length === 0 ? 'Give both the expected and the actual attitudes.'
-      : left.rows.length !== right.rows.length ? `${left.rows.length} expected attitudes cannot be compared with ${right.rows.length} actual ones.`
+  const obstacle = left.error || right.error ? 'Mend what is marked first.'
+    : left.attitudes.length === 0 || right.attitudes.length === 0 ? 'Give both the expected and the actual attitudes.'
+      : left.attitudes.length !== right.attitudes.length ? `${left.attitudes.length} expected attitudes cannot be compared with ${right.attitudes.length} actual ones.`
         : !(within > 0) ? 'The tolerance must be greater than 0.' : null;
 
   return (
@@ -33,15 +33,15 @@ export function Component() {
         event.preventDefault();
         if (obstacle) return;
         verify.mutate({
-          expected: { convention: expected.statement.convention, attitudes: left.rows }, actual: { convention: actual.statement.convention, attitudes: right.rows },
+          expected: { convention: expected.statement.convention, attitudes: left.attitudes }, actual: { convention: actual.statement.convention, attitudes: right.attitudes },
           tolerance: { angle: within, unit: tolerance.unit }, ...(label.trim() && { label: label.trim() }),
         }, { onSuccess: ({ run }) => navigate(`/runs/${run}`) });
       }}>
         <div className="grid gap-6 lg:grid-cols-2">
-          {([['Expected', expected, setExpected, left], ['Actual', actual, setActual, right]] as const).map(([name, side, set, parsed]) => (
+          {([['Expected', expected, setExpected, left], ['Actual', actual, setActual, right]] as const).map(([name, side, set, read]) => (
             <div key={name} className="space-y-4">
-              <ConventionEditor legend={name} statement={side.statement} onChange={(statement) => set({ ...side, statement })} />
-              <RowsEditor label={`${name} attitudes`} text={side.text} parsed={parsed} onChange={(text) => set({ ...side, text })} />
+              <ConventionEditor legend={name} statement={side.statement} onChange={(statement) => set({ ...side, statement, columns: [] })} />
+              <RecordingEditor label={`${name} attitudes`} recording={side} read={read} onChange={set} />
             </div>
           ))}
         </div>
@@ -56,4 +56,10 @@ export function Component() {
       </form>
     </>
   );
+}
+
+/** Reads the text once, however often the convention or the columns change. */
+function useRead(recording: Recording) {
+  const table = useMemo(() => parseTable(recording.text), [recording.text]);
+  return useMemo(() => readRecording(recording, table), [recording, table]);
 }

@@ -1,8 +1,9 @@
-import { NUMBERS_PER_ATTITUDE, type Convention } from '../../../../../shared/attitude/convention.ts';
+import type { Convention } from '../../../../../shared/attitude/convention.ts';
 import { createConverter } from '../../../../../shared/attitude/converter.ts';
 import { AttitudeError } from '../../../../../shared/attitude/errors.ts';
 import { readingOf } from '../../../../../shared/attitude/reading.ts';
 import type { AttitudeWarning } from '../../../../../shared/attitude/warnings.ts';
+import { readNumber } from '../../../lib/read-number.ts';
 import { inRepresentation, REPRESENTATIONS } from './facet-choices.ts';
 
 export interface Computed {
@@ -24,7 +25,7 @@ export interface Refused {
 
 /** The numbers as typed, read without guessing: a decimal comma, a unit or an empty field is no number. */
 export function readNumbers(texts: readonly string[]): { values: number[]; bad: number[] } {
-  const values = texts.map((text) => (/^[+-]?(\d+\.?\d*|\.\d+)(e[+-]?\d+)?$/i.test(text.trim()) ? Number(text) : NaN));
+  const values = texts.map((text) => readNumber(text.trim()));
   return { values, bad: values.flatMap((value, i) => (Number.isFinite(value) ? [] : [i])) };
 }
 
@@ -66,5 +67,3 @@ function lockOf(from: Convention, angles: Convention, input: Float64Array): { ma
     throw error;
   }
 }
-
-export const widthOf = (convention: Convention): number => NUMBERS_PER_ATTITUDE[convention.representation];
