@@ -32,7 +32,7 @@ describe.each(['light', 'dark'] as const)('in the %s theme', (colorScheme) => {
       const { violations } = await new AxeBuilder({ page }).withTags(['wcag2a', 'wcag2aa', 'wcag21a', 'wcag21aa', 'wcag22aa', 'best-practice']).analyze();
       expect(violations.map(({ id, nodes }) => `${path}: ${id}: ${nodes[0]?.html}`)).toEqual([]);
     }
-  }, 120_000);
+  }, 300_000);
 });
 
 it('the API reference answers a call tried with a key, within the content security policy', async () => {
