@@ -1,5 +1,5 @@
-import type { Convention, EulerConvention } from './convention.ts';
-import { canonicalSequence, componentMap, conjugates, elementMap, IDENTITY, transposesMatrix } from './kernels/frames.ts';
+import type { Convention, EulerConvention, QuaternionConvention } from './convention.ts';
+import { canonicalSequence, componentMap, conjugates, elementMap, IDENTITY, transposesMatrix, type ComponentMap } from './kernels/frames.ts';
 import { angleReader } from './kernels/read-angles.ts';
 import { matrixAsMatrix, matrixAsQuaternion } from './kernels/read-matrix.ts';
 import { quaternionReader } from './kernels/read-quaternion.ts';
@@ -7,6 +7,7 @@ import { axisAngleReader, readGibbs, readMrp, rotationVectorReader } from './ker
 import { relabelMatrix, relabelQuaternion } from './kernels/relabel.ts';
 import { anglesOfMatrixSame, anglesOfMatrixThree, anglesOfQuaternionSame, anglesOfQuaternionThree } from './kernels/euler.gen.ts';
 import { quickAnglesOfMatrixSame, quickAnglesOfMatrixThree, quickAnglesOfQuaternionSame, quickAnglesOfQuaternionThree } from './kernels/quick-euler.gen.ts';
+import { quickMatrixOfQuaternion } from './kernels/quick-rotation.gen.ts';
 import { matrixOfQuaternion } from './kernels/rotation.gen.ts';
 import { FINE, REFUSED, type Reader, type Writer } from './kernels/status.ts';
 import { angleWriter } from './kernels/write-angles.ts';
@@ -29,6 +30,8 @@ const LOCK_FROM_QUATERNION = 8.9e-16;
 const LOCK_FROM_ANGLES = 2 ** -96;
 /** A clean matrix' elements are taken as exact. */
 const LOCK_FROM_MATRIX = 0;
+
+const UNMOVED = componentMap({ left: IDENTITY, right: IDENTITY }, false, false);
 
 /**
  * Matrix elements and angles go to angles and matrices as a matrix, which keeps their exact zeros and small cosines;
@@ -77,31 +80,36 @@ function quaternionPipeline(from: Convention, to: Convention, repair: 'none' | '
   if (to.representation === 'dcm') {
     const write = matrixWriter(elementMap(relabelling, conjugates(from), transposesMatrix(to)));
     return {
-      read: quaternionReaderOf(from, repair, 'pairs'),
+      read: readerBetween(from, UNMOVED, repair, 'pairs'),
       write: (numbers, at) => {
-        matrixOfQuaternion();
+        if (!quickMatrixOfQuaternion()) matrixOfQuaternion();
         return write(numbers, at);
       },
     };
   }
   const components = componentMap(relabelling, conjugates(from), conjugates(to));
-  const readPlain = quaternionReaderOf(from, repair, to.representation === 'quaternion' && components.terms === 1 ? 'rounded' : 'pairs');
-  const write = quaternionWriterOf(from, to, components.terms);
   return {
-    read: (numbers, at) => {
-      const status = readPlain(numbers, at);
-      if (status !== REFUSED) relabelQuaternion(components);
-      return status;
-    },
-    write,
+    read: readerBetween(from, components, repair, to.representation === 'quaternion' && components.terms === 1 ? 'rounded' : 'pairs'),
+    write: quaternionWriterOf(from, to, components.terms),
   };
 }
 
-function quaternionReaderOf(from: Convention, repair: 'none' | 'nearest', precision: 'rounded' | 'pairs'): Reader {
+/** Reads as QUATERNION and relabels it. */
+function readerBetween(from: Convention, components: ComponentMap, repair: 'none' | 'nearest', precision: 'rounded' | 'pairs'): Reader {
+  if (from.representation === 'quaternion') return quaternionReader(from, repair, components);
+  const read = quaternionReaderOf(from, repair, precision);
+  if (components === UNMOVED) return read;
+  return (numbers, at) => {
+    const status = read(numbers, at);
+    if (status !== REFUSED) relabelQuaternion(components);
+    return status;
+  };
+}
+
+function quaternionReaderOf(from: Exclude<Convention, QuaternionConvention>, repair: 'none' | 'nearest', precision: 'rounded' | 'pairs'): Reader {
   switch (from.representation) {
     case 'euler': return angleReader(from, 'quaternion', precision);
-    case 'quaternion': return quaternionReader(from, repair);
-    case 'dcm': return matrixAsQuaternion({ elements: elementMap({ left: IDENTITY, right: IDENTITY }, transposesMatrix(from), false), determinant: 1, repair });
+    case 'dcm': return matrixAsQuaternion({ elements: elementMap({ left: IDENTITY, right: IDENTITY }, transposesMatrix(from), false), determinant: 1, repair }, precision);
     case 'rotation-vector': return rotationVectorReader(from.unit);
     case 'axis-angle': return axisAngleReader(from.unit);
     case 'mrp': return readMrp;
@@ -115,7 +123,7 @@ function quaternionWriterOf(from: Convention, to: Convention, terms: 1 | 2 | 4):
   switch (to.representation) {
     case 'quaternion': {
       // A clean quaternion is passed on as it stands: merely listing it otherwise must not change a bit of it.
-      const unit = from.representation !== 'dcm' && from.representation !== 'mrp' && from.representation !== 'gibbs';
+      const unit = from.representation !== 'mrp' && from.representation !== 'gibbs';
       return quaternionWriter(to, unit && terms === 1 ? 'keep' : 'divide', rounded);
     }
     case 'rotation-vector': return rotationVectorWriter(to.unit, rounded);

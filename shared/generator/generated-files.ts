@@ -2,6 +2,7 @@ import { arcTangentSource } from './kernels/arc-tangent.ts';
 import { eulerSource } from './kernels/euler.ts';
 import { quickArcTangentSource } from './kernels/quick-arc-tangent.ts';
 import { quickEulerSource } from './kernels/quick-euler.ts';
+import { quickRotationSource } from './kernels/quick-rotation.ts';
 import { quickSinCosSource } from './kernels/quick-sin-cos.ts';
 import { rotationSource } from './kernels/rotation.ts';
 import { sinCosSource } from './kernels/sin-cos.ts';
@@ -16,6 +17,7 @@ export function generatedFiles(): readonly (readonly [path: string, source: stri
     ['arithmetic/quick-sin-cos.gen.ts', quickSinCosSource()],
     ['arithmetic/quick-arc-tangent.gen.ts', quickArcTangentSource()],
     ['kernels/quick-euler.gen.ts', quickEulerSource()],
+    ['kernels/quick-rotation.gen.ts', quickRotationSource()],
     ['kernels/euler.gen.ts', eulerSource()],
     ['kernels/rotation.gen.ts', rotationSource()],
   ];

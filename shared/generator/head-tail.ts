@@ -43,3 +43,29 @@ export function roundingTest(b: StraightLine, { hi, lo }: Pair, error: Scalar): 
   const upper = b.add(hi, b.add(lo, error));
   return { rounded: lower, settled: b.let(`${lower} === ${upper}`, lower, upper) };
 }
+
+/** √x by one correction of the root of the high part, which is cut to 26 bits so that its square is exact. */
+export function root(b: StraightLine, x: Pair): HeadTail {
+  const sum = b.fastTwoSum(x.hi, x.lo);
+  const head = headOf(b, b.sqrt(sum.hi));
+  const rest = b.add(b.sub(sum.hi, b.mul(head, head)), sum.lo);
+  // The next term of the series, −tail²/2 head, is 2^-54 of the root: one more correction.
+  const twice = b.add(head, head);
+  const reciprocal = b.div('1', twice);
+  const tail = b.mul(rest, reciprocal);
+  return { head, tail: b.sub(tail, b.mul(b.mul(tail, tail), reciprocal)) };
+}
+
+export function reciprocalOf(b: StraightLine, x: HeadTail): HeadTail {
+  const near = b.div('1', b.add(x.head, x.tail));
+  const head = headOf(b, near);
+  const rest = b.sub(b.sub('1', b.mul(head, x.head)), b.mul(head, x.tail));
+  return { head, tail: b.mul(rest, near) };
+}
+
+/** Stores what the pairs round to, and answers whether all of them are settled, being known to within `error`. */
+export function storeRounded(b: StraightLine, slot: number, answer: readonly Pair[], error: number): Scalar {
+  const tests = answer.map((pair) => roundingTest(b, pair, b.literal(error)));
+  tests.forEach(({ rounded }, i) => b.storePair(slot + 2 * i, { hi: rounded, lo: '0' }));
+  return b.let(tests.map(({ settled }) => settled).join(' && '), ...tests.map(({ settled }) => settled));
+}

@@ -27,3 +27,5 @@ export const SEED = 92;
 export const DEFECT = 96;
 /** The matrix as nine doubles, row by row. */
 export const DOUBLES = 98;
+/** Three times two pairs put in order of size and their difference, six slots each: within the arctangents alone. */
+export const BY_SIZE = 128;

@@ -2,7 +2,8 @@ import { scratch as S } from '../arithmetic/scratch.ts';
 import { DEFECT, DOUBLES, MATRIX, SEED } from '../arithmetic/slots.ts';
 import type { ElementMap } from './frames.ts';
 import { nearestRotation } from './nearest-rotation.ts';
-import { matrixOfQuaternion, nearestQuaternion } from './rotation.gen.ts';
+import { quickNearestQuaternion } from './quick-rotation.gen.ts';
+import { matrixOfQuaternion, nearestQuaternion, normaliseQuaternion } from './rotation.gen.ts';
 import { FINE, REFUSED, REFUSED_DEFECT, REPAIRED, REPORTED_DEFECT } from './status.ts';
 
 /**
@@ -48,15 +49,24 @@ function determinantIsPositive(): boolean {
     + S[DOUBLES + 2]! * (S[DOUBLES + 3]! * S[DOUBLES + 7]! - S[DOUBLES + 4]! * S[DOUBLES + 6]!) > 0;
 }
 
+/** Written out, since a loop over nine costs twice as much. */
 export function loadMatrix({ elements: { index, sign } }: MatrixReading, numbers: Float64Array, at: number): void {
-  for (let k = 0; k < 9; k++) S[DOUBLES + k] = sign[k]! * numbers[at + index[k]!]!;
+  S[DOUBLES] = sign[0]! * numbers[at + index[0]!]!;
+  S[DOUBLES + 1] = sign[1]! * numbers[at + index[1]!]!;
+  S[DOUBLES + 2] = sign[2]! * numbers[at + index[2]!]!;
+  S[DOUBLES + 3] = sign[3]! * numbers[at + index[3]!]!;
+  S[DOUBLES + 4] = sign[4]! * numbers[at + index[4]!]!;
+  S[DOUBLES + 5] = sign[5]! * numbers[at + index[5]!]!;
+  S[DOUBLES + 6] = sign[6]! * numbers[at + index[6]!]!;
+  S[DOUBLES + 7] = sign[7]! * numbers[at + index[7]!]!;
+  S[DOUBLES + 8] = sign[8]! * numbers[at + index[8]!]!;
 }
 
 /** FINE for a clean matrix, REPAIRED for one to be replaced by the nearest rotation (the defect at DEFECT), or REFUSED. */
 export function judgeMatrix({ determinant, repair }: MatrixReading): number {
   const defect = orthogonalityDefect();
-  if (defect <= REPORTED_DEFECT) return determinantIsPositive() === determinant > 0 ? FINE : REFUSED;
   S[DEFECT] = defect;
+  if (defect <= REPORTED_DEFECT) return determinantIsPositive() === determinant > 0 ? FINE : REFUSED;
   if (!(defect <= REFUSED_DEFECT) && repair === 'none') return REFUSED;
   const largest = largestElement();
   if (!(largest > 0 && largest < Infinity)) return REFUSED;
@@ -71,8 +81,14 @@ export function largestElement(): number {
   return largest;
 }
 
-/** DOUBLES, a clean rotation, as QUATERNION. Shepperd's pivot (1978, J. Guidance and Control 1(3)) gives the seed. */
+/** DOUBLES, a clean rotation, as QUATERNION of any norm. */
 export function quaternionOfCleanMatrix(): void {
+  seedQuaternion();
+  nearestQuaternion();
+}
+
+/** SEED of DOUBLES by Shepperd's choice of pivot (1978, J. Guidance and Control 1(3)). */
+function seedQuaternion(): void {
   const m00 = S[DOUBLES]!;
   const m11 = S[DOUBLES + 4]!;
   const m22 = S[DOUBLES + 8]!;
@@ -84,7 +100,6 @@ export function quaternionOfCleanMatrix(): void {
   else if (m00 >= m11 && m00 >= m22) seed(dx, 1 + m00 - m11 - m22, S[DOUBLES + 1]! + S[DOUBLES + 3]!, S[DOUBLES + 2]! + S[DOUBLES + 6]!);
   else if (m11 >= m22) seed(dy, S[DOUBLES + 1]! + S[DOUBLES + 3]!, 1 - m00 + m11 - m22, S[DOUBLES + 5]! + S[DOUBLES + 7]!);
   else seed(dz, S[DOUBLES + 2]! + S[DOUBLES + 6]!, S[DOUBLES + 5]! + S[DOUBLES + 7]!, 1 - m00 - m11 + m22);
-  nearestQuaternion();
 }
 
 function seed(w: number, x: number, y: number, z: number): void {
@@ -94,13 +109,23 @@ function seed(w: number, x: number, y: number, z: number): void {
   S[SEED + 3] = z;
 }
 
-/** Reads a matrix as QUATERNION (of any norm), by the nearest rotation throughout. */
-export function matrixAsQuaternion(reading: MatrixReading): (numbers: Float64Array, at: number) => number {
+/** Up to this defect the quick kernel's seed of 26 bits is good enough. */
+const QUICK_DEFECT = 1e-13;
+
+/**
+ * Reads a matrix as QUATERNION, by the nearest rotation throughout.
+ * @param precision - "rounded": of norm 1, and only its nearest doubles; "pairs": of any norm.
+ */
+export function matrixAsQuaternion(reading: MatrixReading, precision: 'rounded' | 'pairs'): (numbers: Float64Array, at: number) => number {
   return (numbers, at) => {
     loadMatrix(reading, numbers, at);
     const status = judgeMatrix(reading);
-    if (status === FINE) quaternionOfCleanMatrix();
-    else if (status === REPAIRED) nearestRotation();
+    if (status === FINE) {
+      seedQuaternion();
+      if (precision === 'rounded' && S[DEFECT]! <= QUICK_DEFECT && quickNearestQuaternion()) return FINE;
+      nearestQuaternion();
+      if (precision === 'rounded') normaliseQuaternion();
+    } else if (status === REPAIRED) nearestRotation();
     return status;
   };
 }
@@ -109,6 +134,7 @@ export function matrixAsQuaternion(reading: MatrixReading): (numbers: Float64Arr
 export function matrixAsMatrix(reading: MatrixReading): (numbers: Float64Array, at: number) => number {
   return (numbers, at) => {
     loadMatrix(reading, numbers, at);
+    copyDoubles();
     const status = judgeMatrix(reading);
     if (status === REPAIRED) {
       // The nearest orthogonal matrix to a reflection M is minus the nearest rotation to −M.
@@ -116,14 +142,31 @@ export function matrixAsMatrix(reading: MatrixReading): (numbers: Float64Array, 
       nearestRotation();
       matrixOfQuaternion();
       if (reading.determinant < 0) negate(MATRIX, 18);
-    } else {
-      for (let k = 0; k < 9; k++) {
-        S[MATRIX + 2 * k] = S[DOUBLES + k]!;
-        S[MATRIX + 2 * k + 1] = 0;
-      }
     }
     return status;
   };
+}
+
+/** DOUBLES as MATRIX. */
+function copyDoubles(): void {
+  S[MATRIX] = S[DOUBLES]!;
+  S[MATRIX + 1] = 0;
+  S[MATRIX + 2] = S[DOUBLES + 1]!;
+  S[MATRIX + 3] = 0;
+  S[MATRIX + 4] = S[DOUBLES + 2]!;
+  S[MATRIX + 5] = 0;
+  S[MATRIX + 6] = S[DOUBLES + 3]!;
+  S[MATRIX + 7] = 0;
+  S[MATRIX + 8] = S[DOUBLES + 4]!;
+  S[MATRIX + 9] = 0;
+  S[MATRIX + 10] = S[DOUBLES + 5]!;
+  S[MATRIX + 11] = 0;
+  S[MATRIX + 12] = S[DOUBLES + 6]!;
+  S[MATRIX + 13] = 0;
+  S[MATRIX + 14] = S[DOUBLES + 7]!;
+  S[MATRIX + 15] = 0;
+  S[MATRIX + 16] = S[DOUBLES + 8]!;
+  S[MATRIX + 17] = 0;
 }
 
 function negate(slot: number, count: number): void {

@@ -1,6 +1,8 @@
 import { scratch as S } from '../arithmetic/scratch.ts';
 import { DEFECT, QUATERNION } from '../arithmetic/slots.ts';
 import type { QuaternionConvention } from '../convention.ts';
+import type { ComponentMap } from './frames.ts';
+import { relabelQuaternion } from './relabel.ts';
 import { normaliseQuaternion } from './rotation.gen.ts';
 import { FINE, REFUSED, REFUSED_DEFECT, REPAIRED, REPORTED_DEFECT, type Reader } from './status.ts';
 
@@ -16,10 +18,13 @@ export function normDefect(w: number, x: number, y: number, z: number): number {
 /**
  * Reads a quaternion as QUATERNION, exactly: it stands for q/|q| and is never rounded to norm 1 first. One that is
  * repaired is left as q/|q| in double-double, so that it leaves with norm 1 in its own convention too.
+ * @param map - the relabelling to the axes wanted; where it only moves components, they are read in their new places.
  */
-export function quaternionReader(convention: QuaternionConvention, repair: 'none' | 'nearest'): Reader {
-  const scalar = convention.scalar === 'first' ? 0 : 3;
-  const vector = convention.scalar === 'first' ? 1 : 0;
+export function quaternionReader(convention: QuaternionConvention, repair: 'none' | 'nearest', map: ComponentMap): Reader {
+  const offsets = convention.scalar === 'first' ? [0, 1, 2, 3] : [3, 0, 1, 2];
+  const moved = map.terms === 1;
+  const [place0, place1, place2, place3] = [0, 1, 2, 3].map((i) => offsets[moved ? map.index[i]! : i]!) as [number, number, number, number];
+  const signs = moved ? map.sign : Float64Array.of(1, 1, 1, 1);
 
   function readOdd(w: number, x: number, y: number, z: number): number {
     const defect = normDefect(w, x, y, z);
@@ -30,16 +35,16 @@ export function quaternionReader(convention: QuaternionConvention, repair: 'none
     while (largest * scale > 2 ** 60) scale *= 2 ** -60;
     while (largest * scale < 2 ** -60) scale *= 2 ** 60;
     store(w * scale, x * scale, y * scale, z * scale);
-    if (defect <= REPORTED_DEFECT) return FINE;
-    normaliseQuaternion();
-    return REPAIRED;
+    if (defect > REPORTED_DEFECT) normaliseQuaternion();
+    if (!moved) relabelQuaternion(map);
+    return defect > REPORTED_DEFECT ? REPAIRED : FINE;
   }
 
   return (numbers, at) => {
-    const w = numbers[at + scalar]!;
-    const x = numbers[at + vector]!;
-    const y = numbers[at + vector + 1]!;
-    const z = numbers[at + vector + 2]!;
+    const w = numbers[at + place0]! * signs[0]!;
+    const x = numbers[at + place1]! * signs[1]!;
+    const y = numbers[at + place2]! * signs[2]!;
+    const z = numbers[at + place3]! * signs[3]!;
     if (!(Math.abs(Math.sqrt(w * w + x * x + y * y + z * z) - 1) <= REPORTED_DEFECT)) return readOdd(w, x, y, z);
     S[QUATERNION] = w;
     S[QUATERNION + 1] = 0;
@@ -49,6 +54,7 @@ export function quaternionReader(convention: QuaternionConvention, repair: 'none
     S[QUATERNION + 5] = 0;
     S[QUATERNION + 6] = z;
     S[QUATERNION + 7] = 0;
+    if (!moved) relabelQuaternion(map);
     return FINE;
   };
 }

@@ -1,5 +1,5 @@
 import { arcTangentDegrees, arcTangentRadians } from '../arithmetic/arc-tangent.gen.ts';
-import { quickArcTangentDegrees, quickArcTangentRadians } from '../arithmetic/quick-arc-tangent.gen.ts';
+import { quickArcTangentsDegrees, quickArcTangentsRadians } from '../arithmetic/quick-arc-tangent.gen.ts';
 import { scratch as S } from '../arithmetic/scratch.ts';
 import { ANGLES, COSINE, LOCKED_FIRST, LOCKED_LAST, POINTS } from '../arithmetic/slots.ts';
 import { PI, TWO_PI } from '../arithmetic/tables.gen.ts';
@@ -35,7 +35,7 @@ export function angleWriter(convention: EulerConvention, lockAt: number): AngleW
   const { order, signs, range } = convention;
   const degrees = convention.unit === 'deg';
   const arcTangent = degrees ? arcTangentDegrees : arcTangentRadians;
-  const quickArcTangent = degrees ? quickArcTangentDegrees : quickArcTangentRadians;
+  const quickArcTangents = degrees ? quickArcTangentsDegrees : quickArcTangentsRadians;
   const quickError = degrees ? QUICK_ERROR_DEGREES : QUICK_ERROR_RADIANS;
   // Rx(a) Ry(b) Rx(c) = Rx(a + π) Ry(−b) Rx(c + π): how a negated middle angle is kept positive when listed.
   const mirrored = symmetric && signs[1] < 0;
@@ -110,9 +110,7 @@ export function angleWriter(convention: EulerConvention, lockAt: number): AngleW
       negatePoint(POINTS);
       negatePoint(POINTS + 8);
     }
-    quickArcTangent(POINTS, ANGLES);
-    quickArcTangent(POINTS + 4, ANGLES + 2);
-    quickArcTangent(POINTS + 8, ANGLES + 4);
+    quickArcTangents();
     return list(numbers, at, quickError) ? FINE : UNSETTLED;
   }
 

@@ -1,5 +1,5 @@
 import { COSINE, MATRIX, POINTS, QUATERNION, SINES_COSINES } from '../../attitude/arithmetic/slots.ts';
-import { headOf, headTail, product, roundingTest, squareOf, type HeadTail } from '../head-tail.ts';
+import { headTail, product, root, squareOf, storeRounded, type HeadTail } from '../head-tail.ts';
 import type { Pair, Scalar, StraightLine } from '../straight-line.ts';
 import { kernelFile } from './kernel-file.ts';
 
@@ -10,13 +10,6 @@ const loaded = (b: StraightLine, slot: number): HeadTail => ({ head: b.load(`S[$
 const sine = (b: StraightLine, turn: number): HeadTail => loaded(b, SINES_COSINES + 4 * turn);
 const cosine = (b: StraightLine, turn: number): HeadTail => loaded(b, SINES_COSINES + 4 * turn + 2);
 
-/** Stores what the pairs round to, and answers whether all of them are settled. */
-function storeRounded(b: StraightLine, slot: number, answer: readonly Pair[]): Scalar {
-  const tests = answer.map((pair) => roundingTest(b, pair, b.literal(COMPONENT_ERROR)));
-  tests.forEach(({ rounded }, i) => b.storePair(slot + 2 * i, { hi: rounded, lo: '0' }));
-  return b.let(tests.map(({ settled }) => settled).join(' && '), ...tests.map(({ settled }) => settled));
-}
-
 function quaternionOfAngles(symmetric: boolean) {
   return (b: StraightLine): Scalar => {
     const [s1, c1, s2, c2, s3, c3] = [sine(b, 0), cosine(b, 0), sine(b, 1), cosine(b, 1), sine(b, 2), cosine(b, 2)];
@@ -24,7 +17,7 @@ function quaternionOfAngles(symmetric: boolean) {
     const t = (p: HeadTail, q: HeadTail): Pair => product(b, p, q);
     return storeRounded(b, QUATERNION, symmetric
       ? [b.minus(t(w, c3), t(x, s3)), b.plus(t(w, s3), t(x, c3)), b.plus(t(y, c3), t(z, s3)), b.minus(t(z, c3), t(y, s3))]
-      : [b.minus(t(w, c3), t(z, s3)), b.plus(t(x, c3), t(y, s3)), b.minus(t(y, c3), t(x, s3)), b.plus(t(w, s3), t(z, c3))]);
+      : [b.minus(t(w, c3), t(z, s3)), b.plus(t(x, c3), t(y, s3)), b.minus(t(y, c3), t(x, s3)), b.plus(t(w, s3), t(z, c3))], COMPONENT_ERROR);
   };
 }
 
@@ -45,7 +38,7 @@ function matrixOfAngles(symmetric: boolean) {
         t(c2, c3), b.negative(t(c2, s3)), whole(s2),
         b.plus(t(c1, s3), t(split(s1s2), c3)), b.minus(t(c1, c3), t(split(s1s2), s3)), b.negative(s1c2),
         b.minus(t(s1, s3), t(split(c1s2), c3)), b.plus(t(s1, c3), t(split(c1s2), s3)), c1c2,
-      ]);
+      ], COMPONENT_ERROR);
   };
 }
 
@@ -55,16 +48,9 @@ function storePoint(b: StraightLine, slot: number, y: Pair, x: Pair): void {
   b.storePair(slot + 2, { hi: side.head, lo: side.tail });
 }
 
-/** √x by one correction of the root of the high part, which is cut to 26 bits so that its square is exact. */
-function root(b: StraightLine, x: Pair): Pair {
-  const sum = b.fastTwoSum(x.hi, x.lo);
-  const head = headOf(b, b.sqrt(sum.hi));
-  const rest = b.add(b.sub(sum.hi, b.mul(head, head)), sum.lo);
-  // The next term of the series, −tail²/2 head, is 2^-54 of the root: one more correction.
-  const twice = b.add(head, head);
-  const reciprocal = b.div('1', twice);
-  const tail = b.mul(rest, reciprocal);
-  return { hi: head, lo: b.sub(tail, b.mul(b.mul(tail, tail), reciprocal)) };
+function rootPair(b: StraightLine, x: Pair): Pair {
+  const { head, tail } = root(b, x);
+  return { hi: head, lo: tail };
 }
 
 function anglesOfQuaternion(symmetric: boolean) {
@@ -76,7 +62,7 @@ function anglesOfQuaternion(symmetric: boolean) {
     storePoint(b, POINTS + 8, b.minus(ir, ri), b.plus(rr, ii));
     const positive = b.plus(squareOf(b, pr), squareOf(b, pi));
     const negative = b.plus(squareOf(b, nr), squareOf(b, ni));
-    const middle = root(b, product(b, headTail(b, positive), headTail(b, negative)));
+    const middle = rootPair(b, product(b, headTail(b, positive), headTail(b, negative)));
     const difference = b.minus(positive, negative);
     if (symmetric) storePoint(b, POINTS + 4, b.scale(middle, 2), difference);
     else storePoint(b, POINTS + 4, b.scale(difference, 0.5), middle);
@@ -93,7 +79,7 @@ function anglesOfMatrix(symmetric: boolean) {
     const [sp, cp] = symmetric ? [at(1, 0), b.negative(at(2, 0))] : [b.negative(at(1, 2)), at(2, 2)];
     const [s, c] = [headTail(b, sp), headTail(b, cp)];
     storePoint(b, POINTS, sp, cp);
-    const middle = root(b, b.plus(squareOf(b, s), squareOf(b, c)));
+    const middle = rootPair(b, b.plus(squareOf(b, s), squareOf(b, c)));
     if (symmetric) storePoint(b, POINTS + 4, middle, at(0, 0));
     else storePoint(b, POINTS + 4, at(0, 2), middle);
     const row = (column: number): Pair => b.plus(product(b, c, headTail(b, at(1, column))), product(b, s, headTail(b, at(2, column))));

@@ -1,6 +1,7 @@
-import { DOUBLES, LENGTH, MATRIX, POINTS, QUATERNION, SEED, SINES_COSINES, VECTOR } from '../../attitude/arithmetic/slots.ts';
+import { LENGTH, MATRIX, POINTS, QUATERNION, SEED, SINES_COSINES, VECTOR } from '../../attitude/arithmetic/slots.ts';
 import type { Pair, StraightLine } from '../straight-line.ts';
 import { kernelFile, sum } from './kernel-file.ts';
+import { davenportPlusOne } from './quick-rotation.ts';
 
 type Four = [Pair, Pair, Pair, Pair];
 type Three = [Pair, Pair, Pair];
@@ -33,20 +34,8 @@ function normalise(b: StraightLine): void {
 }
 
 function nearestQuaternion(b: StraightLine): void {
-  const m = (row: number, column: number): Pair => b.exact(b.load(`S[${DOUBLES + 3 * row + column}]`));
   const seed = [0, 1, 2, 3].map((i) => b.exact(b.load(`S[${SEED + i}]`))) as Four;
-  const d = (p: Pair, q: Pair): Pair => b.minus(p, q);
-  const [dx, dy, dz] = [d(m(2, 1), m(1, 2)), d(m(0, 2), m(2, 0)), d(m(1, 0), m(0, 1))];
-  const [sxy, sxz, syz] = [b.plus(m(0, 1), m(1, 0)), b.plus(m(0, 2), m(2, 0)), b.plus(m(1, 2), m(2, 1))];
-  const [onePlus, oneLess] = [b.plus(ONE, m(0, 0)), b.minus(ONE, m(0, 0))];
-  const [plus, less] = [b.plus(m(1, 1), m(2, 2)), b.minus(m(1, 1), m(2, 2))];
-  const k: readonly Four[] = [
-    [b.plus(onePlus, plus), dx, dy, dz],
-    [dx, b.minus(onePlus, plus), sxy, sxz],
-    [dy, sxy, b.plus(oneLess, less), syz],
-    [dz, sxz, syz, b.minus(oneLess, less)],
-  ];
-  store(b, QUATERNION, k.map((row) => sum(b, ...row.map((entry, i) => b.times(entry, seed[i]!)) as Four)));
+  store(b, QUATERNION, davenportPlusOne(b).map((row) => sum(b, ...row.map((entry, i) => b.times(entry, seed[i]!)) as Four)));
 }
 
 function length(b: StraightLine): void {
