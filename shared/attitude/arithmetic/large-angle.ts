@@ -27,7 +27,7 @@ function scaledPi(): bigint {
   return pi;
 }
 
-/** |x| 2^260 for |x| ≥ 1. */
+/** |x| 2^260; what lies below 2^-260 is cut off. */
 function scaled(x: number): bigint {
   let integer = Math.abs(x);
   let shift = 0n;
@@ -43,8 +43,8 @@ function toDouble(value: bigint): number {
   if (value < 0n) return -toDouble(-value);
   const excess = Math.max(0, value.toString(2).length - 53);
   const kept = excess === 0 ? value : (value + (1n << BigInt(excess - 1))) >> BigInt(excess);
-  // In two steps: 2^-1290 is no double.
-  return Number(kept) * 2 ** (excess - Number(REST_BITS)) * 2 ** -Number(WHOLE_BITS);
+  // In two steps, the smaller first: 2^-1290 is no double, and 2^1030 is none either.
+  return Number(kept) * 2 ** -Number(WHOLE_BITS) * 2 ** (excess - Number(REST_BITS));
 }
 
 /**
@@ -53,24 +53,40 @@ function toDouble(value: bigint): number {
  */
 export function reduceLargeAngle(at: number): void {
   const x = scratch[at]!;
-  const low = scratch[at + 1]!;
-  reduceScaled(scaled(x), x < 0);
-  scratch[REDUCED + 2]! += low;
+  const whole = scaled(x) << WHOLE_BITS;
+  const twoPi = 2n * scaledPi();
+  const k = (whole * 3072n + twoPi / 2n) / twoPi;
+  const rest = toPair((whole * 3072n - k * twoPi) / 3072n);
+  const sign = x < 0 ? -1 : 1;
+  scratch[REDUCED] = sign * Number(k % 3072n) + 0;
+  scratch[REDUCED + 1] = sign * rest[0];
+  scratch[REDUCED + 2] = sign * rest[1] + scratch[at + 1]!;
 }
 
-/** The same for an angle given as `size` 2^-260 and its sign. */
-export function reduceScaled(size: bigint, negative: boolean): void {
-  const whole = size << WHOLE_BITS;
-  const twoPi = 2n * scaledPi();
-  const turned = ((whole * 3072n) / twoPi + 1n) >> 0n;
-  const k = turned - (turned * twoPi - whole * 3072n > twoPi / 2n ? 1n : 0n);
-  const rest = (whole * 3072n - k * twoPi) / 3072n;
-  const hi = toDouble(rest);
-  const hiScaled = rest - fromDouble(hi);
-  const sign = negative ? -1 : 1;
-  scratch[REDUCED] = sign * Number(k % 3072n) + 0;
-  scratch[REDUCED + 1] = sign * hi;
-  scratch[REDUCED + 2] = sign * toDouble(hiScaled);
+/**
+ * Half the length of a vector of any size, less whole turns, as a pair at slot `at`: a length rounded first, even to
+ * 106 bits, would leave nothing of a rotation vector of many turns.
+ */
+export function reduceHalfLength(x: number, y: number, z: number, unit: 'deg' | 'rad', at: number): void {
+  const square = [x, y, z].reduce((sum, component) => sum + scaled(component) ** 2n, 0n);
+  const half = squareRoot(square) << (WHOLE_BITS - 1n);
+  const turn = unit === 'deg' ? 360n << BITS : 2n * scaledPi();
+  [scratch[at], scratch[at + 1]] = toPair(half % turn);
+}
+
+function squareRoot(value: bigint): bigint {
+  let guess = 1n << BigInt((value.toString(2).length >> 1) + 1);
+  for (;;) {
+    const next = (guess + value / guess) >> 1n;
+    if (next >= guess) return guess;
+    guess = next;
+  }
+}
+
+/** A multiple of 2^-1290 as a pair hi, lo. */
+function toPair(value: bigint): [number, number] {
+  const hi = toDouble(value);
+  return [hi, toDouble(value - fromDouble(hi))];
 }
 
 function fromDouble(value: number): bigint {

@@ -1,9 +1,13 @@
+import { reduceHalfLength } from '../arithmetic/large-angle.ts';
 import { scratch as S } from '../arithmetic/scratch.ts';
 import { sinCosDegrees, sinCosRadians } from '../arithmetic/sin-cos.gen.ts';
 import { ANGLES, LENGTH, QUATERNION, SEED, SINES_COSINES, VECTOR } from '../arithmetic/slots.ts';
 import type { AngleUnit } from '../convention.ts';
 import { lengthOfVector, quaternionAboutVector, quaternionOfMrp } from './rotation.gen.ts';
 import { FINE, REFUSED, type Reader } from './status.ts';
+
+/** Half angles beyond this, in either unit, are reduced from the exact length. */
+const MANY_TURNS = 4000;
 
 const isFinite3 = (x: number, y: number, z: number): boolean => Math.abs(x) < Infinity && Math.abs(y) < Infinity && Math.abs(z) < Infinity;
 
@@ -42,6 +46,7 @@ export function rotationVectorReader(unit: AngleUnit): Reader {
     }
     S[ANGLES] = S[LENGTH]! * half;
     S[ANGLES + 1] = S[LENGTH + 1]! * half;
+    if (!(S[ANGLES]! < MANY_TURNS)) reduceHalfLength(x, y, z, unit, ANGLES);
     sinCos(ANGLES, SINES_COSINES);
     quaternionAboutVector();
     return FINE;

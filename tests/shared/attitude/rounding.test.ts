@@ -64,6 +64,24 @@ describe('every component is the double nearest to the exact result', () => {
     }
   }, 60_000);
 
+  it.each([7999, 1e6, 1e15, 1e22, 1e100, 1e300])('for rotations of %d rad and degrees', (size) => {
+    const random = new Random(3);
+    const measure = new Measure(2400);
+    for (const unit of ['rad', 'deg'] as const) {
+      for (const to of [CONVENTIONS.quaternion, CONVENTIONS['rotation vector']]) {
+        const vector: Convention = { ...CONVENTIONS['rotation vector'], unit };
+        const turn = random.direction().map((component) => component * size);
+        measure.add(vector, to, turn, Array.from(createConverter(vector, to).convert(Float64Array.from(turn))));
+        const axisAngle: Convention = { ...CONVENTIONS['axis-angle'], unit };
+        const about = [...random.direction(), -size];
+        measure.add(axisAngle, to, about, Array.from(createConverter(axisAngle, to).convert(Float64Array.from(about))));
+        const euler: Convention = { ...CONVENTIONS['euler rad'], unit };
+        measure.add(euler, to, turn, Array.from(createConverter(euler, to).convert(Float64Array.from(turn))));
+      }
+    }
+    expect(measure.correctlyRounded, JSON.stringify(measure.example)).toBe(measure.components);
+  });
+
   it('by mathjs at 64 digits too, whose code is another', () => {
     for (const [from, to] of COMPUTED) {
       if (CONVENTIONS[from].representation === 'dcm') continue; // the polar factor at 64 digits has its own test
