@@ -1,0 +1,117 @@
+import type { AngleUnit, Convention, DcmConvention } from '../convention.ts';
+import { discriminatingAttitudes } from './explain/discriminating.ts';
+import { editsOf } from './explain/edits.ts';
+import { presentOffset } from './explain/offsets.ts';
+import { StatementChooser, type Choice, type Claim } from './explain/statement-choice.ts';
+import { FEW, unobservableSentences } from './explain/unobservable.ts';
+import { AT_REST, type Fit } from './search/fit.ts';
+import type { EquivalentStatement, Explanation, Identification, RunnerUp } from './identification.ts';
+import { turnMatrix, inverse, TURN_COUNT } from './lattice/turns.ts';
+import type { DecoderSearch, Miss } from './search/decoder-search.ts';
+import type { SearchResult } from './search/search.ts';
+
+export interface Presentation {
+  readonly claim: Claim;
+  readonly reference: Convention;
+  readonly standard: DcmConvention;
+  readonly unit: AngleUnit;
+}
+
+const LISTED = 100;
+const EQUIVALENTS = 12;
+const PER_UNIT: Readonly<Record<AngleUnit, number>> = { deg: Math.PI / 180, rad: 1 };
+/**
+ * Chance, taken over the whole lattice, that some discrete statement fits one attitude by accident; rarer than this, an
+ * offset that would explain the data too is no rival to a discrete explanation.
+ */
+const ACCIDENT = 1e-5;
+/** Statements of the lattice that are not the same numbers: decoders times pairs of axis sets. */
+const LATTICE = 4e4;
+
+interface Ranked {
+  readonly fit: Fit;
+  readonly choice: Choice;
+}
+
+/** Puts the fits of a search into words, fewest edits first, and says what is left open. */
+export function assemble(result: SearchResult, search: DecoderSearch, presentation: Presentation): Identification {
+  const { claim, unit } = presentation;
+  const { problem } = search;
+  const chooser = new StatementChooser(claim);
+  const deviationOf = (fit: Fit): number => Math.sqrt(problem.criteria.found(fit.squaredError, fit.count, 0) / fit.count);
+  const rank = (fits: readonly Fit[]): Ranked[] => fits
+    .flatMap((fit) => chooser.choices(fit, deviationOf(fit), 1).map((choice) => ({ fit, choice })))
+    .sort((x, y) => x.choice.cost - y.choice.cost || x.fit.freed.length - y.fit.freed.length || x.fit.index - y.fit.index);
+
+  const ranked = rank(withShared(rivalsOnly(result.fits, rank, problem.criteria.largest(problem.recording.count), problem.recording.count), search));
+  const listed = ranked.slice(0, LISTED);
+  const [only] = ranked;
+  const sure = ranked.length === 1 && only!.fit.inseparable.length === 0 && (only!.fit.freed.length === 0 || problem.recording.count >= FEW);
+  const largest = search.largestErrors(listed.map(({ fit }) => fit));
+  return {
+    outcome: ranked.length === 0 ? 'none' : sure ? 'unique' : 'ambiguous',
+    explanations: listed.map(({ fit, choice }) => explanationOf(fit, choice, chooser.choices(fit, deviationOf(fit), EQUIVALENTS + 1).slice(1), largest.get(fit)!, presentation)),
+    remaining: ranked.length,
+    unobservable: unobservableSentences({
+      fits: listed.map(({ fit }) => fit), choices: listed.map(({ choice }) => choice), motion: search.motion, numbers: problem.numbers, width: problem.width, sigma: problem.sigma,
+      ambiguous: ranked.length > 0 && !sure, frame: claim.frame,
+    }),
+    discriminating: sure ? [] : discriminatingAttitudes(listed.map(({ fit, choice }) => ({ choice, scale: fit.scale })), presentation.reference, presentation.standard, problem.sigma),
+    runnerUp: result.nearestMiss && runnerUpOf(result.nearestMiss, chooser, problem.sigma, unit, claim),
+  };
+}
+
+/**
+ * Where axis sets alone explain the data, an offset, a lag or a scale beside other axis sets is a rival only if it takes
+ * no more edits: it has numbers of its own to choose, and they could have been anything.
+ */
+function rivalsOnly(fits: readonly Fit[], rank: (fits: readonly Fit[]) => Ranked[], largest: number, count: number): readonly Fit[] {
+  const discrete = fits.filter(({ freed }) => freed.length === 0);
+  if (discrete.length === 0 || discrete.length === fits.length) return fits;
+  const angle = Math.sqrt(largest / count);
+  if (discrete.length === 1 && (LATTICE * angle ** 3) / (6 * Math.PI) < ACCIDENT) return discrete;
+  const fewest = rank(discrete)[0]?.choice.cost ?? Infinity;
+  const others = rank(fits.filter(({ freed }) => freed.length > 0)).filter(({ choice }) => choice.cost <= fewest);
+  return [...discrete, ...others.map(({ fit }) => fit)];
+}
+
+/** Adds, where one side's offset could be the other's in part, the fit that shares it between both. */
+function withShared(fits: readonly Fit[], search: DecoderSearch): readonly Fit[] {
+  if (fits.length > FEW) return fits;
+  return fits.flatMap((fit) => {
+    const sides = fit.inseparable.some(([block, other]) => block !== other && [block, other].every((each) => each === 'reference' || each === 'body'));
+    const shared = sides ? search.shared(fit) : null;
+    return shared ? [fit, shared] : [fit];
+  });
+}
+
+function explanationOf(fit: Fit, choice: Choice, others: readonly Choice[], largest: number, { claim, unit }: Presentation): Explanation {
+  return {
+    ...statementOf(choice, unit),
+    ...(fit.freed.includes('lag') ? { timeLag: { seconds: fit.lag } } : {}),
+    ...(fit.freed.includes('scale') ? { scale: fit.scale } : {}),
+    edits: editsOf(choice, fit, claim),
+    residual: { rms: Math.sqrt(fit.squaredError / fit.count) / PER_UNIT[unit], max: largest / PER_UNIT[unit], unit },
+    sameNumbersAs: others.map((other) => statementOf(other, unit)),
+  };
+}
+
+function statementOf({ statement: { numbersAre }, convention, offsets }: Choice, unit: AngleUnit): EquivalentStatement {
+  const constantOffset = [
+    ...(offsets.reference ? [presentOffset('reference', offsets.reference, unit)] : []),
+    ...(offsets.body ? [presentOffset('body', offsets.body, unit)] : []),
+  ];
+  return { convention, ...(numbersAre ? { numbersAre } : {}), ...(constantOffset.length > 0 ? { constantOffset } : {}) };
+}
+
+const TURN_MATRICES = Array.from({ length: TURN_COUNT }, (_, turn) => turnMatrix(turn));
+
+function runnerUpOf({ decoder, index, pair, squaredError, count }: Miss, chooser: StatementChooser, sigma: number, unit: AngleUnit, claim: Claim): RunnerUp | null {
+  const [bodyTurn, referenceTurn] = [Math.floor(pair / TURN_COUNT), pair % TURN_COUNT];
+  const fit: Fit = { decoder, index, bodyTurn, referenceTurn, b: TURN_MATRICES[bodyTurn]!, a: TURN_MATRICES[inverse(referenceTurn)]!, ...AT_REST, squaredError, count, inseparable: [], unseen: [] };
+  const [choice] = chooser.choices(fit, 0, 1);
+  if (!choice) return null;
+  const rms = Math.sqrt(squaredError / count);
+  const { statement: { numbersAre }, convention } = choice;
+  return { convention, ...(numbersAre ? { numbersAre } : {}), edits: editsOf(choice, fit, claim), residual: { rms: rms / PER_UNIT[unit], unit }, timesNoise: rms / (Math.sqrt(3) * Math.max(sigma, 1e-6)) };
+}

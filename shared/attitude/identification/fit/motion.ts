@@ -1,0 +1,163 @@
+import { lagrange, lastNotAfter, STENCIL } from './interpolation.ts';
+
+/** The reference, at the times of the samples less a lag, with sums that every hypothesis shares. */
+export interface Motion {
+  readonly lag: number;
+  /** Which samples are used: those whose lagged time lies within the recording and in no gap of it. */
+  readonly samples: Int32Array;
+  /** C, nine a used sample, v_body = C v_ref in standard axes. */
+  readonly matrices: Float64Array;
+  /** dC/dt, or null where there are no times. */
+  readonly derivatives: Float64Array | null;
+  readonly sumMatrix: Float64Array;
+  /** Σ ω in body axes and in reference axes, rad/s, and Σ |ω|². */
+  readonly sumBodyRate: Float64Array;
+  readonly sumReferenceRate: Float64Array;
+  readonly sumSquareRate: number;
+  /** Variance a component, rad², that interpolating adds. */
+  readonly interpolationVariance: number;
+}
+
+/** A step longer than this many median ones is a gap: nothing is interpolated across it. */
+const GAP = 3.5;
+
+/** A recording's reference attitudes, and what they were between the samples. */
+export class ReferenceRecording {
+  readonly count: number;
+  readonly matrices: Float64Array;
+  readonly times: Float64Array | null;
+  /** Median step, s. */
+  readonly step: number;
+  readonly #cubicVariance: number;
+  readonly #nodes = new Float64Array(STENCIL);
+  readonly #weights = { value: new Float64Array(STENCIL), derivative: new Float64Array(STENCIL) };
+
+  /** @param times - s, or null; times that do not increase are taken for none. */
+  constructor(matrices: Float64Array, times: Float64Array | null) {
+    this.count = matrices.length / 9;
+    this.matrices = matrices;
+    this.times = times && this.count >= 2 && increasing(times) ? times : null;
+    this.step = this.times ? medianStep(this.times) : 0;
+    this.#cubicVariance = this.times ? this.#measureCubic() : 0;
+  }
+
+  /** Longest lag that is looked for, s, either way: two seconds, or less of a short recording. */
+  get longestLag(): number {
+    return this.times ? Math.min(2, (this.times[this.count - 1]! - this.times[0]!) / 4) : 0;
+  }
+
+  at(lag: number): Motion {
+    const usable: number[] = [];
+    const matrices = new Float64Array(9 * this.count);
+    const derivatives = this.times ? new Float64Array(9 * this.count) : null;
+    let weight = 0;
+    for (let i = 0; i < this.count; i++) {
+      const to = 9 * usable.length;
+      if (derivatives) {
+        const fraction = this.#sample(this.times![i]! - lag, lag === 0, matrices, derivatives, to);
+        if (fraction < 0) continue;
+        weight += (fraction * (1 - fraction) * (1 + fraction) * (2 - fraction) / 0.5625) ** 2;
+      }
+      if (lag === 0) for (let k = 0; k < 9; k++) matrices[to + k] = this.matrices[9 * i + k]!;
+      usable.push(i);
+    }
+    return withSums(lag, Int32Array.from(usable), matrices.subarray(0, 9 * usable.length), derivatives?.subarray(0, 9 * usable.length) ?? null,
+      lag === 0 || usable.length === 0 ? 0 : (this.#cubicVariance * weight) / usable.length);
+  }
+
+  /** One matrix between the samples, for searches on a few of them; false outside the recording or in a gap. */
+  matrixAt(t: number, into: Float64Array, at: number): boolean {
+    return this.#sample(t, false, into, null, at) >= 0;
+  }
+
+  /** Writes C and dC/dt at t; returns where t lies within its step, 0 to 1, or −1 where it cannot be told. */
+  #sample(t: number, onSample: boolean, matrices: Float64Array, derivatives: Float64Array | null, at: number): number {
+    const times = this.times!;
+    const last = this.count - 1;
+    const slack = 1e-6 * this.step;
+    if (t < times[0]! - slack || t > times[last]! + slack) return -1;
+    const j = Math.max(0, Math.min(last - 1, lastNotAfter(times, t)));
+    const nodes = Math.min(STENCIL, this.count);
+    const from = Math.max(0, Math.min(this.count - nodes, j - 1));
+    for (let k = 0; k < nodes; k++) this.#nodes[k] = times[from + k]!;
+    const gap = this.#nodes[nodes - 1]! - this.#nodes[0]! > GAP * (nodes - 1) * this.step;
+    if (gap && !onSample) return -1;
+    const { value, derivative } = this.#weights;
+    lagrange(this.#nodes, nodes, t, this.#weights);
+    for (let k = 0; k < 9; k++) {
+      let v = 0, d = 0;
+      for (let n = 0; n < nodes; n++) {
+        const c = this.matrices[9 * (from + n) + k]!;
+        v += value[n]! * c;
+        d += derivative[n]! * c;
+      }
+      matrices[at + k] = v;
+      // In a gap the rate is unknown; the sample then says nothing of a lag.
+      if (derivatives) derivatives[at + k] = gap ? 0 : d;
+    }
+    return Math.max(0, Math.min(1, (t - times[j]!) / (times[j + 1]! - times[j]!)));
+  }
+
+  /**
+   * Variance a component in the middle of a step: each sample is interpolated from those one and three steps away, at
+   * twice the spacing, and a cubic's error falls by 2⁴; doubled for safety. What the reference carries of noise adds to it.
+   */
+  #measureCubic(): number {
+    if (this.count < 7) return 0;
+    const stride = Math.max(1, Math.floor(this.count / 400));
+    let sum = 0;
+    let measured = 0;
+    for (let i = 3; i + 3 < this.count; i += stride) {
+      [-3, -1, 1, 3].forEach((offset, n) => { this.#nodes[n] = this.times![i + offset]!; });
+      if (this.#nodes[3]! - this.#nodes[0]! > 2 * GAP * 3 * this.step) continue;
+      lagrange(this.#nodes, 4, this.times![i]!, this.#weights);
+      for (let k = 0; k < 9; k++) {
+        const predicted = [-3, -1, 1, 3].reduce((total, offset, n) => total + this.#weights.value[n]! * this.matrices[9 * (i + offset) + k]!, 0);
+        sum += (predicted - this.matrices[9 * i + k]!) ** 2;
+      }
+      measured++;
+    }
+    return measured === 0 ? 0 : (4 * sum) / (2 * 3 * measured * 256);
+  }
+}
+
+function increasing(times: Float64Array): boolean {
+  for (let i = 1; i < times.length; i++) if (!(times[i]! > times[i - 1]!)) return false;
+  return true;
+}
+
+function medianStep(times: Float64Array): number {
+  const steps = new Float64Array(times.length - 1);
+  for (let i = 0; i < steps.length; i++) steps[i] = times[i + 1]! - times[i]!;
+  steps.sort();
+  return steps[steps.length >> 1]!;
+}
+
+function withSums(lag: number, samples: Int32Array, matrices: Float64Array, derivatives: Float64Array | null, interpolationVariance: number): Motion {
+  const sumMatrix = new Float64Array(9);
+  const sumBodyRate = new Float64Array(3);
+  const sumReferenceRate = new Float64Array(3);
+  let sumSquareRate = 0;
+  const c = new Float64Array(9);
+  const omega = new Float64Array(3);
+  for (let i = 0; i < samples.length; i++) {
+    for (let k = 0; k < 9; k++) sumMatrix[k]! += c[k] = matrices[9 * i + k]!;
+    if (!derivatives) continue;
+    bodyRate(c, derivatives, 9 * i, omega);
+    const [x, y, z] = omega as unknown as [number, number, number];
+    for (let k = 0; k < 3; k++) {
+      sumBodyRate[k]! += omega[k]!;
+      sumReferenceRate[k]! += c[k]! * x + c[3 + k]! * y + c[6 + k]! * z;
+    }
+    sumSquareRate += x * x + y * y + z * z;
+  }
+  return { lag, samples, matrices, derivatives, sumMatrix, sumBodyRate, sumReferenceRate, sumSquareRate, interpolationVariance };
+}
+
+/** ω = vee(C Ċᵀ), by its antisymmetric part: [ω×] = C Ċᵀ. */
+export function bodyRate(c: ArrayLike<number>, derivatives: Float64Array, at: number, omega: Float64Array): void {
+  const entry = (i: number, j: number): number => c[3 * i]! * derivatives[at + 3 * j]! + c[3 * i + 1]! * derivatives[at + 3 * j + 1]! + c[3 * i + 2]! * derivatives[at + 3 * j + 2]!;
+  omega[0] = (entry(2, 1) - entry(1, 2)) / 2;
+  omega[1] = (entry(0, 2) - entry(2, 0)) / 2;
+  omega[2] = (entry(1, 0) - entry(0, 1)) / 2;
+}
