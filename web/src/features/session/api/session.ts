@@ -24,13 +24,12 @@ export function useSignIn() {
   });
 }
 
-/** Signs out and forgets everything that was fetched. */
+/** Signs out, and forgets everything that this page holds by leaving it: nothing is fetched again on the way. */
 export function useSignOut() {
-  const queries = useQueryClient();
   return useMutation({
     mutationFn: async () => {
       await client.DELETE('/sessions/current');
     },
-    onSettled: () => queries.resetQueries(),
+    onSettled: () => location.assign('/sign-in'),
   });
 }
