@@ -4,7 +4,7 @@ import { editsOf } from './explain/edits.ts';
 import { presentOffset } from './explain/offsets.ts';
 import { StatementChooser, type Choice, type Claim } from './explain/statement-choice.ts';
 import { FEW, unobservableSentences } from './explain/unobservable.ts';
-import { AT_REST, type Fit } from './search/fit.ts';
+import { AT_REST, NOTHING_HIDDEN, type Fit } from './search/fit.ts';
 import type { EquivalentStatement, Explanation, Identification, RunnerUp } from './identification.ts';
 import { turnMatrix, inverse, TURN_COUNT } from './lattice/turns.ts';
 import type { DecoderSearch, Miss } from './search/decoder-search.ts';
@@ -39,14 +39,19 @@ export function assemble(result: SearchResult, search: DecoderSearch, presentati
   const { problem } = search;
   const chooser = new StatementChooser(claim);
   const deviationOf = (fit: Fit): number => Math.sqrt(problem.criteria.found(fit.squaredError, fit.count, 0) / fit.count);
+  const best = new Map<Fit, Choice | null>();
+  const bestOf = (fit: Fit): Choice | null => {
+    if (!best.has(fit)) best.set(fit, chooser.choices(fit, deviationOf(fit), 1)[0] ?? null);
+    return best.get(fit)!;
+  };
   const rank = (fits: readonly Fit[]): Ranked[] => fits
-    .flatMap((fit) => chooser.choices(fit, deviationOf(fit), 1).map((choice) => ({ fit, choice })))
+    .flatMap((fit) => (bestOf(fit) ? [{ fit, choice: bestOf(fit)! }] : []))
     .sort((x, y) => x.choice.cost - y.choice.cost || x.fit.freed.length - y.fit.freed.length || x.fit.index - y.fit.index);
 
-  const ranked = rank(withShared(rivalsOnly(result.fits, rank, problem.criteria.largest(problem.recording.count), problem.recording.count), search));
+  const ranked = rank(withShared(rivalsOnly(result.fits, rank, problem.criteria.largest(problem.recording.count), problem.recording.count), search, (fit) => chooser.choices(fit, deviationOf(fit), 1)[0]?.cost ?? Infinity));
   const listed = ranked.slice(0, LISTED);
   const [only] = ranked;
-  const sure = ranked.length === 1 && only!.fit.inseparable.length === 0 && (only!.fit.freed.length === 0 || problem.recording.count >= FEW);
+  const sure = ranked.length === 1 && only!.fit.hidden().inseparable.length === 0 && (only!.fit.freed.length === 0 || problem.recording.count >= FEW);
   const largest = search.largestErrors(listed.map(({ fit }) => fit));
   return {
     outcome: ranked.length === 0 ? 'none' : sure ? 'unique' : 'ambiguous',
@@ -75,13 +80,18 @@ function rivalsOnly(fits: readonly Fit[], rank: (fits: readonly Fit[]) => Ranked
   return [...discrete, ...others.map(({ fit }) => fit)];
 }
 
-/** Adds, where one side's offset could be the other's in part, the fit that shares it between both. */
-function withShared(fits: readonly Fit[], search: DecoderSearch): readonly Fit[] {
-  if (fits.length > FEW) return fits;
+/** How many fits are few enough to work out how an offset may be shared between the sides. */
+const WORKED_OUT = 6;
+
+/** Adds, where one side's offset could be the other's in part, the fit that shares it between both; one that does already is put in its plainest words. */
+function withShared(fits: readonly Fit[], search: DecoderSearch, costOf: (fit: Fit) => number): readonly Fit[] {
+  if (fits.length > WORKED_OUT) return fits;
   return fits.flatMap((fit) => {
-    const sides = fit.inseparable.some(([block, other]) => block !== other && [block, other].every((each) => each === 'reference' || each === 'body'));
-    const shared = sides ? search.shared(fit) : null;
-    return shared ? [fit, shared] : [fit];
+    const sides = fit.hidden().inseparable.some((pair) => pair.every((block) => block === 'reference' || block === 'body'));
+    if (!sides) return [fit];
+    const shared = search.shared(fit, costOf);
+    if (!search.problem.criteria.fits(shared.squaredError, shared.count)) return [fit];
+    return fit.bodyTurn === null && fit.referenceTurn === null ? [shared] : [fit, shared];
   });
 }
 
@@ -108,7 +118,7 @@ const TURN_MATRICES = Array.from({ length: TURN_COUNT }, (_, turn) => turnMatrix
 
 function runnerUpOf({ decoder, index, pair, squaredError, count }: Miss, chooser: StatementChooser, sigma: number, unit: AngleUnit, claim: Claim): RunnerUp | null {
   const [bodyTurn, referenceTurn] = [Math.floor(pair / TURN_COUNT), pair % TURN_COUNT];
-  const fit: Fit = { decoder, index, bodyTurn, referenceTurn, b: TURN_MATRICES[bodyTurn]!, a: TURN_MATRICES[inverse(referenceTurn)]!, ...AT_REST, squaredError, count, inseparable: [], unseen: [] };
+  const fit: Fit = { decoder, index, bodyTurn, referenceTurn, b: TURN_MATRICES[bodyTurn]!, a: TURN_MATRICES[inverse(referenceTurn)]!, ...AT_REST, squaredError, count, hidden: () => NOTHING_HIDDEN };
   const [choice] = chooser.choices(fit, 0, 1);
   if (!choice) return null;
   const rms = Math.sqrt(squaredError / count);

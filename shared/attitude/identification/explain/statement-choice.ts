@@ -1,5 +1,6 @@
 import type { Convention, Representation } from '../../convention.ts';
-import { multiply } from '../fit/small-matrix.ts';
+import { dot9 } from '../fit/best-rotation.ts';
+import { multiply, transposed } from '../fit/small-matrix.ts';
 import type { Decoder, Statement } from '../lattice/decoder.ts';
 import { BODY_SETS_BY_TURN, IDENTITY_TURN, inverse, product, REFERENCE_SETS, TURN_COUNT, turnMatrix, type SetNames } from '../lattice/turns.ts';
 import type { Fit } from '../search/fit.ts';
@@ -31,25 +32,60 @@ const LEFT_HANDED = 0.35;
 const SHUSTER = 0.05;
 /** An offset is one edit; the larger it is, the sooner other axis sets with a smaller offset are the better word. */
 const OFFSET_PER_RADIAN = 1;
+const FREE_HEADING = 0.1;
 const TURN_MATRICES = Array.from({ length: TURN_COUNT }, (_, turn) => turnMatrix(turn));
+
+/** A side on which a rotation was fitted, to be shared between axis sets and an offset: B = P_b T, or A = T P_rᵀ. */
+class OffsetSide {
+  readonly #rotation: Float64Array;
+  readonly #isReference: boolean;
+  readonly #deviation: number;
+  readonly #nearest: number;
+  /** By the turn of the axis sets as the decoder has them: relabelling a statement changes no offset. */
+  readonly #terms = new Map<number, OffsetTerms>();
+
+  constructor(rotation: Float64Array, isReference: boolean, deviation: number) {
+    this.#rotation = rotation;
+    this.#isReference = isReference;
+    this.#deviation = deviation;
+    const toward = isReference ? transposed(rotation) : rotation;
+    this.#nearest = TURN_MATRICES.reduce((best, turn, k) => (dot9(turn, toward) > dot9(TURN_MATRICES[best]!, toward) ? k : best), 0);
+  }
+
+  /** With the nearest axis sets, and with the stated ones. */
+  shared(relabel: number, stated: number): { readonly turn: number; readonly offset: OffsetTerms; readonly cost: number }[] {
+    const asStated = product(inverse(relabel), stated);
+    return (asStated === this.#nearest ? [asStated] : [asStated, this.#nearest]).map((own) => {
+      const offset = this.#termsFor(own);
+      // A heading may be counted from anywhere; any other offset is small.
+      const free = this.#isReference && offset.alongAxis === 2;
+      return { turn: product(relabel, own), offset, cost: 1 + (free ? FREE_HEADING : OFFSET_PER_RADIAN) * Math.abs(offset.angle) };
+    });
+  }
+
+  #termsFor(turn: number): OffsetTerms {
+    let terms = this.#terms.get(turn);
+    if (!terms) {
+      const t = this.#isReference ? multiply(this.#rotation, TURN_MATRICES[turn]!) : multiply(TURN_MATRICES[inverse(turn)]!, this.#rotation);
+      this.#terms.set(turn, terms = offsetTerms(t, this.#deviation));
+    }
+    return terms;
+  }
+}
 
 /** Chooses words for fits: of all statements that are the same numbers, the one with the fewest edits. */
 export class StatementChooser {
   readonly #claim: Claim;
   readonly #ordered = new Map<Decoder, { readonly statement: Statement; readonly cost: number }[]>();
 
+  readonly #statedBody: number;
+  readonly #statedReference: number;
+
   constructor(claim: Claim) {
     this.#claim = claim;
-  }
-
-  /** Fewest edits of a pair of turns, offsets aside; Infinity where no statement is possible. */
-  leastCost(decoder: Decoder, bodyTurn: number, referenceTurn: number): number {
-    let least = Infinity;
-    for (const { statement, cost } of this.#statements(decoder)) {
-      if (cost >= least) break;
-      for (const { cost: sets } of this.#setPairs(product(statement.left, bodyTurn), product(statement.right, referenceTurn))) least = Math.min(least, cost + sets);
-    }
-    return least;
+    const { stated, frame } = claim;
+    this.#statedBody = stated ? turnOfSet(BODY_SETS_BY_TURN, stated.body) : IDENTITY_TURN;
+    this.#statedReference = stated && !frame ? turnOfSet(REFERENCE_SETS, stated.reference) : IDENTITY_TURN;
   }
 
   /**
@@ -59,24 +95,29 @@ export class StatementChooser {
   choices(fit: Fit, deviation: number, most: number): Choice[] {
     const found: Choice[] = [];
     const beside = fit.freed.filter((block) => block === 'lag' || block === 'scale').length;
+    const body = fit.bodyTurn === null ? new OffsetSide(fit.b, false, deviation) : null;
+    const reference = fit.referenceTurn === null ? new OffsetSide(fit.a, true, deviation) : null;
+    const sides = beside + (body ? 1 : 0) + (reference ? 1 : 0);
     for (const { statement, cost } of this.#statements(fit.decoder)) {
       // The list is in the order of its facets' costs, and sets and offsets only add.
-      if (found.length >= most && cost + beside > found[most - 1]!.cost) break;
-      const bodies = this.#side(fit.bodyTurn, statement.left, () => multiply(turnMatrix(statement.left), fit.b), this.#statedBody(), deviation, false);
-      const references = this.#side(fit.referenceTurn, statement.right, () => multiply(fit.a, turnMatrix(inverse(statement.right))), this.#statedReference(), deviation, true);
-      for (const body of bodies) for (const reference of references) {
-        for (const sets of this.#setPairs(body.turn, reference.turn)) {
-          found.push({
-            statement,
-            convention: { ...statement.facets, reference: sets.reference, body: sets.body } as Convention,
-            offsets: { ...(reference.offset ? { reference: reference.offset } : {}), ...(body.offset ? { body: body.offset } : {}) },
-            cost: cost + sets.cost + body.cost + reference.cost + beside,
-          });
-        }
+      if (found.length >= most && cost + sides >= found[most - 1]!.cost) break;
+      const { left, right } = statement;
+      const bodies = body ? body.shared(left, this.#statedBody) : [{ turn: product(left, fit.bodyTurn!), cost: 0 }];
+      const references = reference ? reference.shared(right, this.#statedReference) : [{ turn: product(right, fit.referenceTurn!), cost: 0 }];
+      for (const b of bodies) for (const r of references) for (const sets of this.#setPairs(b.turn, r.turn)) {
+        const total = cost + sets.cost + b.cost + r.cost + beside;
+        if (found.length >= most && total >= found[most - 1]!.cost) continue;
+        found.push({
+          statement,
+          convention: { ...statement.facets, reference: sets.reference, body: sets.body } as Convention,
+          offsets: { ...('offset' in r ? { reference: r.offset } : {}), ...('offset' in b ? { body: b.offset } : {}) },
+          cost: total,
+        });
+        found.sort((x, y) => x.cost - y.cost);
+        found.length = Math.min(found.length, most);
       }
-      found.sort((x, y) => x.cost - y.cost);
     }
-    return found.slice(0, most);
+    return found;
   }
 
   #statements(decoder: Decoder) {
@@ -89,30 +130,6 @@ export class StatementChooser {
       this.#ordered.set(decoder, ordered);
     }
     return ordered;
-  }
-
-  /** One side's turn, or the turns between which and an offset a fitted rotation may be shared. */
-  #side(turn: number | null, relabel: number, rotation: () => Float64Array, stated: number, deviation: number, isReference: boolean): { readonly turn: number; readonly offset?: OffsetTerms; readonly cost: number }[] {
-    if (turn !== null) return [{ turn: product(relabel, turn), cost: 0 }];
-    const r = rotation();
-    // body: B = P_b T; reference: A = T P_rᵀ.
-    const left = (candidate: number): Float64Array => (isReference ? multiply(r, TURN_MATRICES[candidate]!) : multiply(TURN_MATRICES[inverse(candidate)]!, r));
-    const nearest = TURN_MATRICES.reduce((best, _, candidate) => (traceOf(left(candidate)) > traceOf(left(best)) ? candidate : best), 0);
-    return [...new Set([stated, nearest])].map((candidate) => {
-      const offset = offsetTerms(left(candidate), deviation);
-      // A heading may be counted from anywhere; any other offset is small.
-      const free = isReference && offset.alongAxis === 2;
-      return { turn: candidate, offset, cost: 1 + (free ? 0.1 : OFFSET_PER_RADIAN) * Math.abs(offset.angle) };
-    });
-  }
-
-  #statedBody(): number {
-    return this.#claim.stated ? turnOfSet(BODY_SETS_BY_TURN, this.#claim.stated.body) : IDENTITY_TURN;
-  }
-
-  #statedReference(): number {
-    const { stated, frame } = this.#claim;
-    return stated && !frame ? turnOfSet(REFERENCE_SETS, stated.reference) : IDENTITY_TURN;
   }
 
   /** Letters for a pair of turns: both right-handed or both left-handed, or one of each where the matrices are mirrored. */
@@ -141,6 +158,3 @@ const turnOfSet = (sets: readonly SetNames[], letters: string): number => {
   const turn = sets.findIndex(({ rightHanded, leftHanded }) => rightHanded === letters || leftHanded === letters);
   return turn < 0 ? IDENTITY_TURN : turn;
 };
-
-const traceOf = (m: Float64Array): number => m[0]! + m[4]! + m[8]!;
-

@@ -71,12 +71,12 @@ function constantNumbers({ numbers, width, sigma }: Seen): string[] {
 /** Parameters that could hide, and those that could be one another. */
 function hiddenParameters({ fits, motion }: Seen): string[] {
   const sentences: string[] = [];
-  const alike = new Set<Block>(fits.flatMap(({ inseparable }) => inseparable.flat()));
+  const alike = new Set<Block>(fits.flatMap(({ hidden }) => hidden().inseparable.flat()));
   const alternatives = new Set(fits.flatMap(({ freed }) => (freed.length === 1 ? freed : [])));
   // Different single parameters that each explain the same decoder and axis sets are one another's doubles.
   if (alternatives.size > 1) alternatives.forEach((block) => alike.add(block));
   const first = fits[0];
-  const unseen = first?.unseen ?? [];
+  const unseen = first?.hidden().unseen ?? [];
   if (alike.size > 0) {
     unseen.forEach((block) => alike.add(block));
     sentences.push(`In these data ${list([...alike].map((block) => NAMES[block]))} cannot be told apart${steady(motion) ? ': the turn is steady' : alike.has('reference') && alike.has('body') ? ': there is too little tilt between the samples' : ''}.`);

@@ -4,13 +4,13 @@ export interface LagrangeWeights {
   readonly derivative: Float64Array;
 }
 
-/** Nodes of a cubic. */
-export const STENCIL = 4;
+/** Nodes of a quintic: its error falls with the sixth power of the step. */
+export const STENCIL = 6;
 
 /**
- * Lagrange's weights at t, written into `weights`; nodes times[index[0]] … are distinct, their spacing is free.
+ * Lagrange's weights at t, written into `weights`; nodes are distinct, their spacing is free.
  *
- * @param nodes - times of the nodes, 2 to 4 of them.
+ * @param nodes - times of the nodes, s; the first `count` of them are used.
  */
 export function lagrange(nodes: Float64Array, count: number, t: number, weights: LagrangeWeights): void {
   const { value, derivative } = weights;

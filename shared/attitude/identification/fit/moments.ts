@@ -66,6 +66,22 @@ const transposeSums = (sums: Float64Array): Float64Array => {
   return out;
 };
 
+/** Σ |M₊ − M₋|² / 8, M₊ and M₋ with the numbers divided by e^step and by e^−step: Σ of the squared turn a step makes. */
+export function squaredTurn(reader: Reader, numbers: Float64Array, factor: number, count: number, step: number): number {
+  const { width } = reader;
+  const up = new Float64Array(9 * BLOCK);
+  const down = new Float64Array(9 * BLOCK);
+  let sum = 0;
+  for (let from = 0; from < count; from += BLOCK) {
+    const size = Math.min(BLOCK, count - from);
+    const part = numbers.subarray(width * from, width * (from + size));
+    reader.read(part, size, factor * Math.exp(-step), up);
+    reader.read(part, size, factor * Math.exp(step), down);
+    for (let k = 0; k < 9 * size; k++) sum += (up[k]! - down[k]!) ** 2;
+  }
+  return sum / 8;
+}
+
 /** The sums for the transposes of the same matrices. */
 export const transposedMoments = (moments: Moments): Moments => ({
   ...moments,

@@ -18,6 +18,8 @@ export interface Motion {
   readonly interpolationVariance: number;
 }
 
+/** Interpolation worse than this part of the steps themselves, and the attitudes jump. */
+const JUMP = 0.02;
 /** A step longer than this many median ones is a gap: nothing is interpolated across it. */
 const GAP = 3.5;
 
@@ -25,10 +27,10 @@ const GAP = 3.5;
 export class ReferenceRecording {
   readonly count: number;
   readonly matrices: Float64Array;
-  readonly times: Float64Array | null;
+  times: Float64Array | null;
   /** Median step, s. */
   readonly step: number;
-  readonly #cubicVariance: number;
+  readonly #middleVariance: number;
   readonly #nodes = new Float64Array(STENCIL);
   readonly #weights = { value: new Float64Array(STENCIL), derivative: new Float64Array(STENCIL) };
 
@@ -38,7 +40,9 @@ export class ReferenceRecording {
     this.matrices = matrices;
     this.times = times && this.count >= 2 && increasing(times) ? times : null;
     this.step = this.times ? medianStep(this.times) : 0;
-    this.#cubicVariance = this.times ? this.#measureCubic() : 0;
+    this.#middleVariance = this.times ? this.#measureInterpolation() : 0;
+    // Attitudes that jump from sample to sample have no rate, and nothing lies between them.
+    if (this.times && this.#middleVariance > JUMP ** 2 * this.#stepVariance()) this.times = null;
   }
 
   /** Longest lag that is looked for, s, either way: two seconds, or less of a short recording. */
@@ -56,13 +60,13 @@ export class ReferenceRecording {
       if (derivatives) {
         const fraction = this.#sample(this.times![i]! - lag, lag === 0, matrices, derivatives, to);
         if (fraction < 0) continue;
-        weight += (fraction * (1 - fraction) * (1 + fraction) * (2 - fraction) / 0.5625) ** 2;
+        weight += (4 * fraction * (1 - fraction)) ** 2;
       }
       if (lag === 0) for (let k = 0; k < 9; k++) matrices[to + k] = this.matrices[9 * i + k]!;
       usable.push(i);
     }
     return withSums(lag, Int32Array.from(usable), matrices.subarray(0, 9 * usable.length), derivatives?.subarray(0, 9 * usable.length) ?? null,
-      lag === 0 || usable.length === 0 ? 0 : (this.#cubicVariance * weight) / usable.length);
+      lag === 0 || usable.length === 0 ? 0 : (this.#middleVariance * weight) / usable.length);
   }
 
   /** One matrix between the samples, for searches on a few of them; false outside the recording or in a gap. */
@@ -99,25 +103,37 @@ export class ReferenceRecording {
   }
 
   /**
-   * Variance a component in the middle of a step: each sample is interpolated from those one and three steps away, at
-   * twice the spacing, and a cubic's error falls by 2⁴; doubled for safety. What the reference carries of noise adds to it.
+   * Variance a component in the middle of a step: each sample is interpolated from those one, three and five steps away,
+   * at twice the spacing, and a quintic's error falls by 2⁶; doubled for safety. What the reference carries of noise adds to it.
    */
-  #measureCubic(): number {
-    if (this.count < 7) return 0;
+  #measureInterpolation(): number {
+    if (this.count < 11) return this.count < 7 ? 0 : this.#measured([-3, -1, 1, 3], 16);
+    return this.#measured([-5, -3, -1, 1, 3, 5], 64);
+  }
+
+  #measured(offsets: readonly number[], falls: number): number {
+    const reach = offsets[offsets.length - 1]!;
     const stride = Math.max(1, Math.floor(this.count / 400));
     let sum = 0;
     let measured = 0;
-    for (let i = 3; i + 3 < this.count; i += stride) {
-      [-3, -1, 1, 3].forEach((offset, n) => { this.#nodes[n] = this.times![i + offset]!; });
-      if (this.#nodes[3]! - this.#nodes[0]! > 2 * GAP * 3 * this.step) continue;
-      lagrange(this.#nodes, 4, this.times![i]!, this.#weights);
+    for (let i = reach; i + reach < this.count; i += stride) {
+      offsets.forEach((offset, n) => { this.#nodes[n] = this.times![i + offset]!; });
+      if (this.#nodes[offsets.length - 1]! - this.#nodes[0]! > GAP * 2 * reach * this.step) continue;
+      lagrange(this.#nodes, offsets.length, this.times![i]!, this.#weights);
       for (let k = 0; k < 9; k++) {
-        const predicted = [-3, -1, 1, 3].reduce((total, offset, n) => total + this.#weights.value[n]! * this.matrices[9 * (i + offset) + k]!, 0);
+        const predicted = offsets.reduce((total, offset, n) => total + this.#weights.value[n]! * this.matrices[9 * (i + offset) + k]!, 0);
         sum += (predicted - this.matrices[9 * i + k]!) ** 2;
       }
       measured++;
     }
-    return measured === 0 ? 0 : (4 * sum) / (2 * 3 * measured * 256);
+    return measured === 0 ? 0 : (4 * sum) / (2 * 3 * measured * falls * falls);
+  }
+
+  /** Mean square of a component of the rotation from sample to sample. */
+  #stepVariance(): number {
+    let sum = 0;
+    for (let k = 9; k < this.matrices.length; k++) sum += (this.matrices[k]! - this.matrices[k - 9]!) ** 2;
+    return sum / (2 * 3 * Math.max(1, this.count - 1));
   }
 }
 
@@ -145,6 +161,12 @@ function withSums(lag: number, samples: Int32Array, matrices: Float64Array, deri
     if (!derivatives) continue;
     bodyRate(c, derivatives, 9 * i, omega);
     const [x, y, z] = omega as unknown as [number, number, number];
+    // Ċ = −[ω×] C exactly: what interpolation adds beside a rotation would pass for a lag.
+    for (let k = 0; k < 3; k++) {
+      derivatives[9 * i + k] = z * c[3 + k]! - y * c[6 + k]!;
+      derivatives[9 * i + 3 + k] = x * c[6 + k]! - z * c[k]!;
+      derivatives[9 * i + 6 + k] = y * c[k]! - x * c[3 + k]!;
+    }
     for (let k = 0; k < 3; k++) {
       sumBodyRate[k]! += omega[k]!;
       sumReferenceRate[k]! += c[k]! * x + c[3 + k]! * y + c[6 + k]! * z;

@@ -1,6 +1,6 @@
 import type { Moments } from './moments.ts';
 import type { Motion } from './motion.ts';
-import { applied } from './small-matrix.ts';
+import { applied, dominantEigenvector } from './small-matrix.ts';
 
 /**
  * The continuous parameters of a hypothesis, about a point where M ≈ B C A: an offset a on the reference side (A ← A
@@ -27,6 +27,8 @@ export interface ScaledMoments {
   readonly step: number;
   readonly up: Moments;
   readonly down: Moments;
+  /** Σ of the squared turn, rad², that a step of the scale makes. */
+  readonly squaredTurn: number;
 }
 
 /** Sums that depend on the point alone. */
@@ -104,7 +106,7 @@ export function normalEquations(moments: Moments, motion: Motion, b: Float64Arra
     const down = sumsAt(scaled.down, b, a);
     const { step } = scaled;
     gradient[SCALE] = (down.squaredError - up.squaredError) / (4 * step);
-    set(SCALE, SCALE, Math.max(0, (up.squaredError + down.squaredError - 2 * at.squaredError) / (2 * step * step)));
+    set(SCALE, SCALE, scaled.squaredTurn / (step * step));
     for (let i = 0; i < 3; i++) {
       set(REFERENCE_OFFSET + i, SCALE, (down.reference[i]! - up.reference[i]!) / (2 * step));
       set(BODY_OFFSET + i, SCALE, (down.body[i]! - up.body[i]!) / (2 * step));
@@ -116,14 +118,24 @@ export function normalEquations(moments: Moments, motion: Motion, b: Float64Arra
 
 /** How large each parameter may be at all: a ridge that keeps what the data do not tell at rest. rad, rad, s, ln. */
 const RANGE = [1, 1, 1, 1, 1, 1, 2, 0.5];
+/**
+ * A direction that the others take over all but for the curvature of the rotations, which is of the order of the mean
+ * square residual, is not known by what is left of it: a ridge of so many times that share of its information.
+ */
+const CURVATURE = 10;
+const MOST_CURVATURE = 0.1;
+/**
+ * A scale shrinks the noise with the numbers, so its gradient is off by up to ten times Σ |r|² for no reason. A ridge of
+ * this many times N Σ |r|² keeps that from explaining more than about one sample's noise; where the motion shows a scale
+ * at all, its information is far larger.
+ */
+const SHRINKAGE = 100;
 
 export interface Solution {
   /** All eight; 0 where not freed. */
   readonly parameters: Float64Array;
   /** How much freeing them lowers Σ |r|². */
   readonly explained: number;
-  /** Inverse of the information matrix of the freed ones, ridge included; times σ² it is their covariance. */
-  readonly inverse: Float64Array;
   readonly freed: readonly number[];
 }
 
@@ -137,36 +149,85 @@ export function placesOf(blocks: readonly number[], { hasLag, hasScale }: Normal
 }
 
 /** @param variance - of a component of r, rad²: the scale of the ridge. */
-export function solve(equations: NormalEquations, freed: readonly number[], variance: number): Solution {
-  const n = freed.length;
-  const ridge = Math.max(variance, 1e-12 * equations.count);
-  const m = new Float64Array(n * 2 * n);
-  freed.forEach((p, i) => {
-    freed.forEach((q, j) => { m[2 * n * i + j] = equations.information[PARAMETERS * p + q]!; });
-    m[2 * n * i + i]! += ridge / RANGE[p]! ** 2;
-    m[2 * n * i + n + i] = 1;
-  });
-  // Gauss and Jordan, positive definite by the ridge: no pivoting.
-  for (let k = 0; k < n; k++) {
-    const pivot = m[2 * n * k + k]!;
-    for (let j = 0; j < 2 * n; j++) m[2 * n * k + j]! /= pivot;
-    for (let i = 0; i < n; i++) {
-      if (i === k) continue;
-      const factor = m[2 * n * i + k]!;
-      if (factor !== 0) for (let j = 0; j < 2 * n; j++) m[2 * n * i + j]! -= factor * m[2 * n * k + j]!;
+export const solve = (equations: NormalEquations, freed: readonly number[], variance: number): Solution =>
+  solved(equations, freed, variance, Math.min(MOST_CURVATURE, (CURVATURE * equations.squaredError) / equations.count));
+
+/** The step of Newton's from where the parameters are, without the ridges that keep a test from false gains. */
+export const stepOf = (equations: NormalEquations, freed: readonly number[], variance: number): Float64Array => solved(equations, freed, variance, 0).parameters;
+
+/** Information that is less than this part of what a parameter has alone is finite differences and curvature. */
+const LEAST_SHARE = 1e-5;
+
+/**
+ * Standard deviation, worst direction, of the parameters from `from` on with all of `freed` free; their range where the
+ * others can take them over.
+ */
+export function deviationOf(equations: NormalEquations, freed: readonly number[], from: number, size: number, variance: number): number {
+  const inverse = inverseInformation(equations, freed, variance);
+  const first = freed.indexOf(from);
+  const block = new Float64Array(size * size);
+  for (let i = 0; i < size; i++) for (let j = 0; j < size; j++) block[size * i + j] = inverse[freed.length * (first + i) + first + j]!;
+  const worst = block.slice();
+  dominantEigenvector(worst, size);
+  const largest = Math.max(...Array.from({ length: size }, (_, i) => worst[(size + 1) * i]!));
+  const alone = equations.information[(PARAMETERS + 1) * from]!;
+  const share = Math.max(LEAST_SHARE, (CURVATURE * equations.squaredError) / equations.count);
+  return largest * alone * share > 1 || alone === 0 ? RANGE[from]! : Math.min(RANGE[from]!, Math.sqrt(largest * variance));
+}
+
+const factor = new Float64Array(PARAMETERS * PARAMETERS);
+
+/** Cholesky's factor of the information matrix of the freed parameters, with its ridges, row by row with stride PARAMETERS. */
+function factorise({ information, squaredError, count }: NormalEquations, freed: readonly number[], variance: number, curvature: number): void {
+  const ridge = Math.max(variance, 1e-12 * count);
+  for (let i = 0; i < freed.length; i++) {
+    const p = freed[i]!;
+    for (let j = 0; j <= i; j++) {
+      let sum = information[PARAMETERS * p + freed[j]!]!;
+      if (i === j) {
+        sum += ridge / RANGE[p]! ** 2 + curvature * sum;
+        if (p === SCALE && curvature > 0) sum += SHRINKAGE * count * squaredError;
+      }
+      for (let k = 0; k < j; k++) sum -= factor[PARAMETERS * i + k]! * factor[PARAMETERS * j + k]!;
+      // Below the ridge only by rounding.
+      factor[PARAMETERS * i + j] = i === j ? Math.sqrt(Math.max(sum, 0.1 * ridge)) : sum / factor[PARAMETERS * j + j]!;
     }
   }
-  const inverse = new Float64Array(n * n);
-  const parameters = new Float64Array(PARAMETERS);
+}
+
+function solved(equations: NormalEquations, freed: readonly number[], variance: number, curvature: number): Solution {
+  factorise(equations, freed, variance, curvature);
+  const n = freed.length;
+  const y = new Float64Array(PARAMETERS);
   let explained = 0;
   for (let i = 0; i < n; i++) {
-    let value = 0;
-    for (let j = 0; j < n; j++) {
-      inverse[n * i + j] = m[2 * n * i + n + j]!;
-      value += inverse[n * i + j]! * equations.gradient[freed[j]!]!;
-    }
-    parameters[freed[i]!] = value;
-    explained += value * equations.gradient[freed[i]!]!;
+    let sum = equations.gradient[freed[i]!]!;
+    for (let k = 0; k < i; k++) sum -= factor[PARAMETERS * i + k]! * y[k]!;
+    y[i] = sum / factor[(PARAMETERS + 1) * i]!;
+    explained += y[i]! * y[i]!;
   }
-  return { parameters, explained: Math.max(0, explained), inverse, freed };
+  const parameters = new Float64Array(PARAMETERS);
+  for (let i = n - 1; i >= 0; i--) {
+    let sum = y[i]!;
+    for (let k = i + 1; k < n; k++) sum -= factor[PARAMETERS * k + i]! * parameters[freed[k]!]!;
+    parameters[freed[i]!] = sum / factor[(PARAMETERS + 1) * i]!;
+  }
+  return { parameters, explained, freed };
+}
+
+/** Inverse of the information matrix of the freed parameters, n × n, no ridge but the range's; times σ² their covariance. */
+export function inverseInformation(equations: NormalEquations, freed: readonly number[], variance: number): Float64Array {
+  const n = freed.length;
+  const inverse = new Float64Array(n * n);
+  for (let column = 0; column < n; column++) {
+    const { parameters } = solved({ ...equations, gradient: unit(freed[column]!) }, freed, variance, 0);
+    for (let i = 0; i < n; i++) inverse[n * i + column] = parameters[freed[i]!]!;
+  }
+  return inverse;
+}
+
+function unit(place: number): Float64Array {
+  const out = new Float64Array(PARAMETERS);
+  out[place] = 1;
+  return out;
 }

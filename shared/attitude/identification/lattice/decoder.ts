@@ -35,6 +35,8 @@ export interface Reader {
   readonly width: 3 | 4 | 9;
   /** Whether numbers times a factor are still an attitude, another one: what makes a scale of the numbers observable. */
   readonly scalable: boolean;
+  /** Where a common factor changes no attitude: the factor, from the first sample. */
+  norm?(numbers: Float64Array): number;
   /**
    * @param factor - what every number (of axis-angle: the angle) is multiplied by first.
    * @returns false where the numbers cannot be read this way (a vector part longer than 1, an axis that is no unit vector).

@@ -14,6 +14,7 @@ function matrixReader(multiple: 0.5 | 1 | 2): Reader {
   return {
     width: 9,
     scalable: false,
+    norm: (numbers) => Math.sqrt(squareOf(numbers, 0) / 3),
     read(numbers, count, _factor, m) {
       const scale = Math.sqrt(squareOf(numbers, 0) / 3);
       if (!(scale > 0)) return false;

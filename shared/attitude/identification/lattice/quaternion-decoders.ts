@@ -18,6 +18,7 @@ function quaternionReader(scalar: Scalar, multiple: Multiple): Reader {
   return {
     width: 4,
     scalable: false,
+    norm: (numbers) => Math.hypot(numbers[0]!, numbers[1]!, numbers[2]!, numbers[3]!),
     read(numbers, count, _factor, m) {
       const first = Math.hypot(numbers[0]!, numbers[1]!, numbers[2]!, numbers[3]!);
       if (!(first > 0)) return false;

@@ -1,6 +1,6 @@
 import { startForBody } from '../fit/both-sides.ts';
 import { Criteria } from '../fit/criteria.ts';
-import { momentsOf, transposedMoments, type Moments } from '../fit/moments.ts';
+import { momentsOf, squaredTurn, transposedMoments, type Moments } from '../fit/moments.ts';
 import type { Motion, ReferenceRecording } from '../fit/motion.ts';
 import type { Decoder, Reader } from '../lattice/decoder.ts';
 import { AT_REST, keyOf, type Fit, type Place } from './fit.ts';
@@ -77,7 +77,7 @@ export class DecoderSearch {
     if (decoder.reader.scalable) {
       const up = this.#momentsAt(decoder, place.lag, place.scale * Math.exp(SCALE_STEP));
       const down = this.#momentsAt(decoder, place.lag, place.scale * Math.exp(-SCALE_STEP));
-      if (up && down) scaled = { step: SCALE_STEP, up, down };
+      if (up && down) scaled = { step: SCALE_STEP, up, down, squaredTurn: squaredTurn(decoder.reader, numbers, 1 / place.scale, moments.count, SCALE_STEP) };
     }
     return fitDecoder({
       decoder, index, place, motion, moments, scaled,
@@ -113,11 +113,10 @@ export class DecoderSearch {
     return errors;
   }
 
-  /** The same fit with its offset shared between both sides, where the data do not say which side it is on. */
-  shared(fit: Fit): Fit | null {
+  /** The same fit with its offset shared between both sides in the fewest words, where the data do not say which side it is on. */
+  shared(fit: Fit, costOf: (fit: Fit) => number): Fit {
     const { motion, criteria } = this.#at(fit.lag);
-    const moments = this.#momentsAt(fit.decoder, fit.lag, fit.scale);
-    return moments && shareOffset(fit, moments, motion, criteria.variance);
+    return shareOffset(fit, this.#momentsAt(fit.decoder, fit.lag, fit.scale)!, motion, criteria.variance, costOf);
   }
 
   #idOf(reader: Reader): number {

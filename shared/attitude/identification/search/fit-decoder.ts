@@ -114,8 +114,7 @@ class Gathered {
     this.fits.push({
       decoder, index, bodyTurn, referenceTurn, b, a, lag: place.lag, scale: place.scale, freed,
       squaredError: models.squaredError(freed), count: moments.count,
-      inseparable: inseparable(models, freed, a, b, place),
-      unseen: unseen(models, freed),
+      hidden: once(() => ({ inseparable: inseparable(models, freed, a, b, place), unseen: unseen(models, freed) })),
     });
     return true;
   }
@@ -141,11 +140,16 @@ class Gathered {
     const { place } = this.#at;
     const free = (['lag', 'scale'] as const).filter((block) => blocks.includes(block));
     this.elsewhere.push({
-      lag: place.lag + (free.includes('lag') ? models.parameter('lag', blocks) : 0),
-      scale: place.scale * (free.includes('scale') ? Math.exp(models.parameter('scale', blocks)) : 1),
+      lag: place.lag + (free.includes('lag') ? models.step('lag', blocks) : 0),
+      scale: place.scale * (free.includes('scale') ? Math.exp(models.step('scale', blocks)) : 1),
       freed: free,
     });
   }
+}
+
+function once<T>(reckon: () => T): () => T {
+  let value: T | undefined;
+  return () => (value ??= reckon());
 }
 
 /**

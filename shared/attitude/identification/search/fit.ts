@@ -3,6 +3,15 @@ import type { Decoder } from '../lattice/decoder.ts';
 /** Continuous parameters of a hypothesis. */
 export type Block = 'reference' | 'body' | 'lag' | 'scale';
 
+export interface Hidden {
+  /** Parameters that others could take over without a trace in these data: [fitted, the other]. */
+  readonly inseparable: readonly (readonly [Block, Block])[];
+  /** Parameters not fitted that could be of any size, alone or together, without a trace in these data. */
+  readonly unseen: readonly Block[];
+}
+
+export const NOTHING_HIDDEN: Hidden = { inseparable: [], unseen: [] };
+
 /** A hypothesis with its parameters fitted: M(numbers / scale) = B C(t − lag) A for the decoder's matrices M. */
 export interface Fit {
   readonly decoder: Decoder;
@@ -19,10 +28,8 @@ export interface Fit {
   /** Σ |r|², rad², over `count` samples. */
   readonly squaredError: number;
   readonly count: number;
-  /** Parameters that others could take over without a trace in these data: [fitted, the other]. */
-  readonly inseparable: readonly (readonly [Block, Block])[];
-  /** Parameters not fitted that could be of any size, alone or together, without a trace in these data. */
-  readonly unseen: readonly Block[];
+  /** What the data leave open about the parameters; reckoned when asked for. */
+  readonly hidden: () => Hidden;
 }
 
 export const keyOf = ({ index, bodyTurn, referenceTurn, freed }: Fit): string => `${index}/${bodyTurn ?? '*'}/${referenceTurn ?? '*'}/${freed.includes('lag') ? 'lag' : ''}${freed.includes('scale') ? 'scale' : ''}`;

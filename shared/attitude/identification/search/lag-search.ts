@@ -1,5 +1,6 @@
 import type { ReferenceRecording } from '../fit/motion.ts';
 import type { Reader } from '../lattice/decoder.ts';
+import { goldenMinimum } from './golden-minimum.ts';
 import { chordMismatch, numbersAt, squaredChord, variedSamples } from './samples.ts';
 
 /** Most places of the lag that are tried before refining. */
@@ -58,24 +59,4 @@ export class LagSearch {
     }
     return Float64Array.from({ length: this.#pairs.length / 2 }, (_, p) => squaredChord(c, this.#pairs[2 * p]!, this.#pairs[2 * p + 1]!));
   }
-}
-
-/** Where a function with one minimum between low and high is least, to 1e-5 of their distance. */
-export function goldenMinimum(f: (x: number) => number, low: number, high: number): number {
-  const ratio = (Math.sqrt(5) - 1) / 2;
-  let [a, b] = [low, high];
-  let c = b - ratio * (b - a), d = a + ratio * (b - a);
-  let fc = f(c), fd = f(d);
-  for (let step = 0; step < 24; step++) {
-    if (fc <= fd) {
-      [b, d, fd] = [d, c, fc];
-      c = b - ratio * (b - a);
-      fc = f(c);
-    } else {
-      [a, c, fc] = [c, d, fd];
-      d = a + ratio * (b - a);
-      fd = f(d);
-    }
-  }
-  return (a + b) / 2;
 }

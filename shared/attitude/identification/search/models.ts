@@ -1,9 +1,12 @@
 import type { Criteria } from '../fit/criteria.ts';
-import { BODY_OFFSET, LAG, PARAMETERS, placesOf, REFERENCE_OFFSET, SCALE, solve, type NormalEquations, type Solution } from '../fit/normal-equations.ts';
+import { BODY_OFFSET, deviationOf, LAG, placesOf, REFERENCE_OFFSET, SCALE, solve, stepOf, type NormalEquations, type Solution } from '../fit/normal-equations.ts';
 import type { Block } from './fit.ts';
 
 const PLACE: Readonly<Record<Block, number>> = { reference: REFERENCE_OFFSET, body: BODY_OFFSET, lag: LAG, scale: SCALE };
 export const BLOCKS: readonly Block[] = ['reference', 'body', 'lag', 'scale'];
+
+/** The least logarithm of a scale that is told from the noise, in standard deviations of one sample. */
+const LEAST_SCALE = 3;
 
 const without = (blocks: readonly Block[]): Block[] => BLOCKS.filter((block) => !blocks.includes(block));
 
@@ -43,37 +46,27 @@ export class Models {
     const larger = [...blocks, ...more];
     const freed = this.solution(larger).freed.length;
     const k = freed - this.solution(blocks).freed.length;
+    // Where angles wrap, noise folds over, and a scale of about the size of the noise unfolds it.
+    if (more.includes('scale') && Math.abs(this.step('scale', larger)) < LEAST_SCALE * Math.sqrt(this.#criteria.variance)) return false;
     return this.#criteria.earned(this.squaredError(blocks) - this.squaredError(larger), this.squaredError(larger), this.#equations.count, k, freed);
   }
 
-  /** Fits, and nothing beside it has earned a place: one at a time, or all together. */
+  /** Fits, and nothing beside it has earned a place: one at a time, or all but a scale together. */
   suffices(blocks: readonly Block[]): boolean {
     if (!this.fits(blocks)) return false;
     const rest = without(blocks).filter((block) => this.has(block));
-    return !rest.some((block) => this.earned(blocks, [block])) && !this.earned(blocks, rest);
+    return !rest.some((block) => this.earned(blocks, [block])) && !this.earned(blocks, rest.filter((block) => block !== 'scale'));
   }
 
-  /** Largest standard deviation of a block's parameters with some blocks free. */
+  /** Standard deviation, worst direction, of a block's parameters with some blocks free. */
   deviation(block: Block, free: readonly Block[]): number {
-    const { inverse, freed } = this.solution(free);
+    const { freed } = this.solution(free);
     const variance = this.#criteria.found(this.squaredError(free), this.#equations.count, freed.length);
-    const from = PLACE[block];
-    let largest = 0;
-    freed.forEach((place, i) => {
-      if (place >= from && place < from + (block === 'lag' || block === 'scale' ? 1 : 3)) largest = Math.max(largest, inverse[freed.length * i + i]!);
-    });
-    return Math.sqrt(largest * variance);
+    return deviationOf(this.#equations, freed, PLACE[block], block === 'lag' || block === 'scale' ? 1 : 3, variance);
   }
 
-  parameter(block: 'lag' | 'scale', blocks: readonly Block[]): number {
-    return this.solution(blocks).parameters[PLACE[block]]!;
+  /** Newton's step for the lag or the logarithm of the scale. */
+  step(block: 'lag' | 'scale', blocks: readonly Block[]): number {
+    return stepOf(this.#equations, this.solution(blocks).freed, this.#criteria.variance)[PLACE[block]]!;
   }
-
-  offset(block: 'reference' | 'body', blocks: readonly Block[]): readonly [number, number, number] {
-    const { parameters } = this.solution(blocks);
-    const from = PLACE[block];
-    return [parameters[from]!, parameters[from + 1]!, parameters[from + 2]!];
-  }
-
-  static readonly parameterCount = PARAMETERS;
 }

@@ -1,6 +1,6 @@
 import type { Motion } from '../fit/motion.ts';
 import type { Reader } from '../lattice/decoder.ts';
-import { goldenMinimum } from './lag-search.ts';
+import { goldenMinimum } from './golden-minimum.ts';
 import { chordMismatch, numbersAt, variedSamples, type VariedSamples } from './samples.ts';
 
 /** Scales near which an error of a few per cent, up to a fifth, is looked for. */

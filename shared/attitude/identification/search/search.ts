@@ -23,12 +23,13 @@ export function search(decoderSearch: DecoderSearch): SearchResult {
   const follow = (decoder: Decoder, index: number, places: readonly Place[]): void => { if (places.length > 0) keep(decoderSearch.follow(decoder, index, places)); };
 
   decoders.forEach((decoder, index) => {
-    if (!decoderSearch.alive(decoder, AT_REST)) {
+    const rest = restOf(decoder, problem.numbers);
+    if (!decoderSearch.alive(decoder, rest)) {
       const miss = decoderSearch.nearestOnVaried(decoder, index);
       if (miss) misses.push(miss);
       return;
     }
-    const { fits: found, elsewhere, nearestMiss } = decoderSearch.fitAt(decoder, index, AT_REST);
+    const { fits: found, elsewhere, nearestMiss } = decoderSearch.fitAt(decoder, index, rest);
     keep(found);
     if (nearestMiss) misses.push({ decoder, index, count: recording.count, ...nearestMiss });
     follow(decoder, index, elsewhere);
@@ -40,7 +41,8 @@ export function search(decoderSearch: DecoderSearch): SearchResult {
     decoders.forEach((decoder, index) => {
       const at = found.get(decoder.reader) ?? lags.lagsFor(decoder.reader);
       found.set(decoder.reader, at);
-      const places = at.map((lag): Place => ({ lag, scale: 1, freed: ['lag'] })).filter((place) => decoderSearch.alive(decoder, place));
+      const rest = restOf(decoder, problem.numbers);
+      const places = at.map((lag): Place => ({ lag, scale: rest.scale, freed: ['lag', ...rest.freed] })).filter((place) => decoderSearch.alive(decoder, place));
       follow(decoder, index, places);
     });
   }
@@ -54,6 +56,14 @@ export function search(decoderSearch: DecoderSearch): SearchResult {
   const rms = ({ squaredError, count }: Miss): number => squaredError / count;
   misses.sort((a, b) => rms(a) - rms(b));
   return { fits: dropLarger([...fits.values()]), nearestMiss: misses[0] ?? null };
+}
+
+/** Further from 1 than this, the norm of a quaternion or a matrix is a scale of its numbers. */
+const NORM_SLACK = 0.02;
+
+function restOf({ reader }: Decoder, numbers: Float64Array): Place {
+  const norm = reader.norm?.(numbers) ?? 1;
+  return Math.abs(norm - 1) <= NORM_SLACK || !(norm > 0) ? AT_REST : { lag: 0, scale: norm, freed: ['scale'] };
 }
 
 /** Without explanations that are another one with parameters added that it does not need. */

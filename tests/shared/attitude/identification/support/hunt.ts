@@ -49,12 +49,18 @@ export function caseOf(seed: number, choices: Choices): Case {
     }
   }
   const sigma = noise.pick(choices.sigmas);
+  // Faces are taken one after another, in no time: a lag would mix them.
+  const kind = noise.pick(choices.kinds);
   return {
-    seed, stated, truth, names, sigma,
-    kind: noise.pick(choices.kinds), count: noise.pick(choices.counts), rate: noise.pick([5, 10, 20, 50]),
+    seed, stated, names, sigma, kind,
+    truth: kind === 'sixFaces' ? withoutLag(truth) : truth, count: noise.pick(choices.counts), rate: noise.pick([5, 10, 20, 50]),
     statedSigma: sigma * noise.pick(choices.overstated),
     withTimes: truth.lag !== undefined || noise.uniform() < 0.7,
   };
+}
+
+function withoutLag({ lag: _, ...rest }: Statement): Statement {
+  return rest;
 }
 
 export function recordingOf({ seed, truth, kind, count, rate, sigma }: Case): Recording {

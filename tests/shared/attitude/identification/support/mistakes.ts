@@ -1,4 +1,5 @@
 import { ORDERS, SEQUENCES, type Convention, type EulerConvention } from '#shared/attitude/convention.ts';
+import { determinantOf } from '#shared/attitude/relabelling.ts';
 import type { Statement } from './statements.ts';
 
 /** One mistake of an interface: what the box really follows, given what was stated. */
@@ -12,7 +13,8 @@ const onConvention = (name: string, change: (convention: Convention) => Conventi
   name,
   apply: (statement) => {
     const convention = change(statement.convention);
-    return convention && { ...statement, convention };
+    // Between sets that differ in handedness only a matrix can be listed.
+    return convention && (convention.representation === 'dcm' || determinantOf(convention) === 1) ? { ...statement, convention } : null;
   },
 });
 
