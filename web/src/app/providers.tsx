@@ -1,16 +1,19 @@
-import { QueryCache, QueryClient, QueryClientProvider } from '@tanstack/react-query';
+import { MutationCache, QueryCache, QueryClient, QueryClientProvider } from '@tanstack/react-query';
 import { useState, type ReactNode } from 'react';
 import { sessionQuery } from '../features/session/api/session.ts';
 import { ApiError } from '../lib/api-error.ts';
 
+/** What the service answers to a console whose session has ended: a call without a session is one without a key. */
+const NOBODY = new Set(['not-signed-in', 'missing-key']);
+
 function createQueryClient(): QueryClient {
-  const client: QueryClient = new QueryClient({
-    queryCache: new QueryCache({
-      onError: (error, query) => {
-        // A session that ended shows in whichever query comes next: the layout then leads to the sign-in page and back.
-        if (error instanceof ApiError && error.code === 'not-signed-in' && query.queryKey[0] !== 'session') void client.invalidateQueries(sessionQuery);
-      },
-    }),
+  function noticeSessionEnd(error: Error) {
+    // It shows in whichever call comes next; the layout then asks for the password over the page as it stands.
+    if (error instanceof ApiError && NOBODY.has(error.code)) client.setQueryData(sessionQuery.queryKey, null);
+  }
+  const client = new QueryClient({
+    queryCache: new QueryCache({ onError: noticeSessionEnd }),
+    mutationCache: new MutationCache({ onError: noticeSessionEnd }),
     defaultOptions: {
       queries: { staleTime: 10_000, retry: (failures, error) => !(error instanceof ApiError) && failures < 2 },
     },

@@ -1,10 +1,10 @@
-const DATE_TIME = new Intl.DateTimeFormat('en-GB', { dateStyle: 'medium', timeStyle: 'medium', timeZone: 'UTC' });
-const DATE = new Intl.DateTimeFormat('en-GB', { dateStyle: 'medium', timeZone: 'UTC' });
 const COUNT = new Intl.NumberFormat('en-GB');
 
-/** Times are shown in UTC, as logs of pipelines are. */
-export const dateTime = (timestamp: string): string => `${DATE_TIME.format(new Date(timestamp))} UTC`;
-export const date = (timestamp: string): string => DATE.format(new Date(timestamp));
+/** Times are shown in UTC as logs of pipelines write them (ISO 8601), so that they sort and cannot be misread. */
+export const date = (timestamp: string): string => new Date(timestamp).toISOString().slice(0, 10);
+/** For columns whose heading says UTC. */
+export const time = (timestamp: string): string => `${date(timestamp)} ${new Date(timestamp).toISOString().slice(11, 19)}`;
+export const dateTime = (timestamp: string): string => `${time(timestamp)} UTC`;
 export const count = (value: number): string => COUNT.format(value);
 
 /** A duration in milliseconds with sensible digits. */

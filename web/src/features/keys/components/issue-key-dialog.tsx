@@ -1,9 +1,11 @@
+import { useState } from 'react';
 import { useForm } from 'react-hook-form';
 import { Button } from '../../../components/button.tsx';
 import { Dialog } from '../../../components/dialog.tsx';
 import { CodeBlock } from '../../../components/code-block.tsx';
 import { SelectField, TextField } from '../../../components/field.tsx';
 import { Notice, ProblemNotice } from '../../../components/notice.tsx';
+import { atFields } from '../../../lib/field-problems.ts';
 import { useIssueKey, type IssueKeyInput } from '../api/keys.ts';
 
 interface FormValues {
@@ -12,13 +14,18 @@ interface FormValues {
   expires: string;
 }
 
+const FIELDS = { '/name': 'name', '/role': 'role', '/expiresAt': 'expires' } as const;
+
 /** Issues a key; its secret is shown here once and is nowhere to be had afterwards. */
 export function IssueKeyDialog({ onClose }: { onClose: () => void }) {
   const issue = useIssueKey();
-  const { register, handleSubmit, formState: { errors } } = useForm<FormValues>({ defaultValues: { name: '', role: 'engineer', expires: '' } });
+  const [elsewhere, setElsewhere] = useState<Error | null>(null);
+  const { register, handleSubmit, setError, formState: { errors } } = useForm<FormValues>({ defaultValues: { name: '', role: 'engineer', expires: '' } });
   if (issue.data) return <SecretDialog name={issue.data.key.name} secret={issue.data.secret} onClose={onClose} />;
 
-  const submit = handleSubmit(({ name, role, expires }) => issue.mutate({ name, role, expiresAt: expires === '' ? null : `${expires}T23:59:59Z` }));
+  const submit = handleSubmit(({ name, role, expires }) => issue.mutate({ name, role, expiresAt: expires === '' ? null : `${expires}T23:59:59Z` }, {
+    onError: (error) => setElsewhere(atFields(error, FIELDS, (field, message) => setError(field, { message }, { shouldFocus: true })) ? null : error),
+  }));
   return (
     <Dialog title="Issue an API key" onClose={onClose}>
       <form className="space-y-4" noValidate onSubmit={(event) => void submit(event)}>
@@ -28,7 +35,7 @@ export function IssueKeyDialog({ onClose }: { onClose: () => void }) {
         </SelectField>
         <TextField label="Last day" type="date" hint="The key stops working after this day (UTC). Empty: it does not expire." error={errors.expires?.message}
           {...register('expires', { validate: (day) => day === '' || `${day}T23:59:59Z` > new Date().toISOString() || 'This day has passed.' })} />
-        {issue.error && <ProblemNotice error={issue.error} />}
+        {elsewhere && <ProblemNotice error={elsewhere} />}
         <div className="flex justify-end gap-3"><Button onClick={onClose}>Cancel</Button><Button kind="main" type="submit" busy={issue.isPending}>Issue key</Button></div>
       </form>
     </Dialog>

@@ -1,17 +1,17 @@
 import { Button } from '../../../components/button.tsx';
 import { Table } from '../../../components/table.tsx';
-import { date, dateTime } from '../../../lib/format.ts';
+import { date, time } from '../../../lib/format.ts';
 import { stateOf, type ApiKey } from '../api/keys.ts';
 
 export function KeyTable({ keys, onRevoke }: { keys: readonly ApiKey[]; onRevoke: ((key: ApiKey) => void) | null }) {
   return (
-    <Table caption="API keys, newest first" rows={keys} rowKey={({ id }) => id} columns={[
+    <Table wide caption="API keys, newest first" rows={keys} rowKey={({ id }) => id} columns={[
       { title: 'Name', cell: (key) => <><span className="font-semibold">{key.name}</span><br /><code className="text-soft">{key.prefix}…</code></> },
       { title: 'Role', cell: (key) => key.role },
       { title: 'State', cell: (key) => <KeyState apiKey={key} /> },
-      { title: 'Issued', cell: (key) => <>{date(key.createdAt)}<br /><span className="text-soft">by {key.createdBy.name}</span></> },
-      { title: 'Expires', cell: (key) => (key.expiresAt === null ? 'never' : date(key.expiresAt)) },
-      { title: 'Last used', cell: (key) => (key.lastUsedAt === null ? 'never' : dateTime(key.lastUsedAt)) },
+      { title: 'Issued', nowrap: true, cell: (key) => <>{date(key.createdAt)}<br /><span className="text-soft">by {key.createdBy.name}</span></> },
+      { title: 'Expires', nowrap: true, cell: (key) => (key.expiresAt === null ? 'never' : date(key.expiresAt)) },
+      { title: 'Last used, UTC', nowrap: true, cell: (key) => (key.lastUsedAt === null ? 'never' : time(key.lastUsedAt)) },
       ...(onRevoke ? [{ title: 'Change', cell: (key: ApiKey) => (key.revokedAt === null ? <Button onClick={() => onRevoke(key)} aria-label={`Revoke ${key.name}`}>Revoke</Button> : <span className="text-soft">none left</span>) }] : []),
     ]} />
   );

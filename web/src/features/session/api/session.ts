@@ -13,10 +13,11 @@ export const sessionQuery = queryOptions({
   staleTime: 60_000,
 });
 
+/** Signs in on the sign-in page: whatever was fetched for somebody else is forgotten. */
 export function useSignIn() {
   const queries = useQueryClient();
   return useMutation({
-    mutationFn: async (input: SignInInput) => (await dataOf(client.POST('/sessions', { body: input }))).person,
+    mutationFn: signIn,
     onSuccess: (person) => {
       queries.clear();
       queries.setQueryData(sessionQuery.queryKey, person);
@@ -24,7 +25,21 @@ export function useSignIn() {
   });
 }
 
-/** Signs out, and forgets everything that this page holds by leaving it: nothing is fetched again on the way. */
+/** Goes on with the same person's session where the last one ended: what failed meanwhile is fetched again. */
+export function useSignInAgain() {
+  const queries = useQueryClient();
+  return useMutation({
+    mutationFn: signIn,
+    onSuccess: async (person) => {
+      queries.setQueryData(sessionQuery.queryKey, person);
+      await queries.invalidateQueries({ predicate: ({ queryKey }) => queryKey[0] !== sessionQuery.queryKey[0] });
+    },
+  });
+}
+
+const signIn = async (input: SignInInput): Promise<Person> => (await dataOf(client.POST('/sessions', { body: input }))).person;
+
+/** Signs out, and forgets everything that this page holds by leaving it. */
 export function useSignOut() {
   return useMutation({
     mutationFn: async () => {

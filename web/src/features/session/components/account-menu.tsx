@@ -10,7 +10,7 @@ export function AccountMenu({ person }: { person: Person }) {
   const signOut = useSignOut();
   return (
     <Popover.Root>
-      <Popover.Trigger className="min-h-10 cursor-pointer px-1 underline decoration-rule underline-offset-4 hover:text-accent">{person.name}</Popover.Trigger>
+      <Popover.Trigger className="min-h-10 cursor-pointer px-1 underline decoration-rule underline-offset-4 hover:text-accent"><span className="sm:hidden">{person.name.split(' ')[0]}</span><span className="hidden sm:inline">{person.name}</span></Popover.Trigger>
       <Popover.Content align="end" sideOffset={6} className="z-10 w-72 border border-rule bg-sheet p-4">
         <p className="font-semibold">{person.name}</p>
         <p className="break-words text-soft">{person.email}<br />{person.role}</p>
