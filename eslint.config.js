@@ -13,6 +13,7 @@ const noWeb = [['**/web/**'], 'This layer must not know the console.'];
 const noTests = [['#tests/*', '**/tests/**'], 'Source must not import tests.'];
 const noExpress = [['express', 'express-*', 'helmet', 'pino-http', 'swagger-ui-express', '#server/http/**', '**/http/**'], 'Domain and data access speak plain values, not HTTP.'];
 const noSequelize = [['sequelize', 'sqlite3', 'umzug', '#server/db/models/**', '#server/db/migrations/**'], 'Only server/db touches the database packages.'];
+const noClient = [['**/lib/api-client.ts'], 'Pages and components ask through the query options and mutations of a feature’s api folder.'];
 
 export default tseslint.config(
   { ignores: ['dist/', 'data/', 'node_modules/', '**/*.gen.ts'] },
@@ -47,4 +48,6 @@ export default tseslint.config(
     rules: forbid(noServer, noTests, [['**/features/**', '**/app/**'], 'Components and lib know no feature and no page.']),
   },
   { files: ['web/src/features/**/*.{ts,tsx}'], rules: forbid(noServer, noTests, [['**/app/**'], 'Features know no page.']) },
+  { files: ['web/src/features/*/{components,model}/**/*.{ts,tsx}'], rules: forbid(noServer, noTests, noClient, [['**/app/**'], 'Features know no page.']) },
+  { files: ['web/src/app/**/*.{ts,tsx}'], rules: forbid(noServer, noTests, noClient) },
 );
