@@ -8,7 +8,7 @@ import { AT_REST, NOTHING_HIDDEN, type Fit } from './search/fit.ts';
 import type { EquivalentStatement, Explanation, Identification, RunnerUp } from './identification.ts';
 import { turnMatrix, inverse, TURN_COUNT } from './lattice/turns.ts';
 import type { DecoderSearch, Miss } from './search/decoder-search.ts';
-import type { SearchResult } from './search/search.ts';
+import { search } from './search/search.ts';
 
 export interface Presentation {
   readonly claim: Claim;
@@ -20,24 +20,17 @@ export interface Presentation {
 const LISTED = 100;
 const EQUIVALENTS = 12;
 const PER_UNIT: Readonly<Record<AngleUnit, number>> = { deg: Math.PI / 180, rad: 1 };
-/**
- * Chance, taken over the whole lattice, that some discrete statement fits one attitude by accident; rarer than this, an
- * offset that would explain the data too is no rival to a discrete explanation.
- */
-const ACCIDENT = 1e-5;
-/** Statements of the lattice that are not the same numbers: decoders times pairs of axis sets. */
-const LATTICE = 4e4;
-
 interface Ranked {
   readonly fit: Fit;
   readonly choice: Choice;
 }
 
 /** Puts the fits of a search into words, fewest edits first, and says what is left open. */
-export function assemble(result: SearchResult, search: DecoderSearch, presentation: Presentation): Identification {
+export function assemble(decoderSearch: DecoderSearch, presentation: Presentation): Identification {
   const { claim, unit } = presentation;
-  const { problem } = search;
+  const { problem } = decoderSearch;
   const chooser = new StatementChooser(claim);
+  const result = search(decoderSearch, (decoder, bodyTurn, referenceTurn) => chooser.leastCost(decoder, bodyTurn, referenceTurn));
   const deviationOf = (fit: Fit): number => Math.sqrt(problem.criteria.found(fit.squaredError, fit.count, 0) / fit.count);
   const best = new Map<Fit, Choice | null>();
   const bestOf = (fit: Fit): Choice | null => {
@@ -48,17 +41,18 @@ export function assemble(result: SearchResult, search: DecoderSearch, presentati
     .flatMap((fit) => (bestOf(fit) ? [{ fit, choice: bestOf(fit)! }] : []))
     .sort((x, y) => x.choice.cost - y.choice.cost || x.fit.freed.length - y.fit.freed.length || x.fit.index - y.fit.index);
 
-  const ranked = rank(withShared(rivalsOnly(result.fits, rank, problem.criteria.largest(problem.recording.count), problem.recording.count), search, (fit) => chooser.choices(fit, deviationOf(fit), 1)[0]?.cost ?? Infinity));
+  const rivals = rank(result.fits).filter(({ fit, choice }) => fit.freed.length === 0 || choice.cost <= result.budget).map(({ fit }) => fit);
+  const ranked = rank(withShared(rivals, decoderSearch, (fit) => chooser.choices(fit, deviationOf(fit), 1)[0]?.cost ?? Infinity));
   const listed = ranked.slice(0, LISTED);
   const [only] = ranked;
   const sure = ranked.length === 1 && only!.fit.hidden().inseparable.length === 0 && (only!.fit.freed.length === 0 || problem.recording.count >= FEW);
-  const largest = search.largestErrors(listed.map(({ fit }) => fit));
+  const largest = decoderSearch.largestErrors(listed.map(({ fit }) => fit));
   return {
     outcome: ranked.length === 0 ? 'none' : sure ? 'unique' : 'ambiguous',
     explanations: listed.map(({ fit, choice }) => explanationOf(fit, choice, chooser.choices(fit, deviationOf(fit), EQUIVALENTS + 1).slice(1), largest.get(fit)!, presentation)),
     remaining: ranked.length,
     unobservable: unobservableSentences({
-      fits: listed.map(({ fit }) => fit), choices: listed.map(({ choice }) => choice), motion: search.motion, numbers: problem.numbers, width: problem.width, sigma: problem.sigma,
+      fits: listed.map(({ fit }) => fit), choices: listed.map(({ choice }) => choice), motion: decoderSearch.motion, numbers: problem.numbers, width: problem.width, sigma: problem.sigma,
       ambiguous: ranked.length > 0 && !sure, frame: claim.frame,
     }),
     discriminating: sure ? [] : discriminatingAttitudes(listed.map(({ fit, choice }) => ({ choice, scale: fit.scale })), presentation.reference, presentation.standard, problem.sigma),
@@ -66,31 +60,17 @@ export function assemble(result: SearchResult, search: DecoderSearch, presentati
   };
 }
 
-/**
- * Where axis sets alone explain the data, an offset, a lag or a scale beside other axis sets is a rival only if it takes
- * no more edits: it has numbers of its own to choose, and they could have been anything.
- */
-function rivalsOnly(fits: readonly Fit[], rank: (fits: readonly Fit[]) => Ranked[], largest: number, count: number): readonly Fit[] {
-  const discrete = fits.filter(({ freed }) => freed.length === 0);
-  if (discrete.length === 0 || discrete.length === fits.length) return fits;
-  const angle = Math.sqrt(largest / count);
-  if (discrete.length === 1 && (LATTICE * angle ** 3) / (6 * Math.PI) < ACCIDENT) return discrete;
-  const fewest = rank(discrete)[0]?.choice.cost ?? Infinity;
-  const others = rank(fits.filter(({ freed }) => freed.length > 0)).filter(({ choice }) => choice.cost <= fewest);
-  return [...discrete, ...others.map(({ fit }) => fit)];
-}
-
 /** How many fits are few enough to work out how an offset may be shared between the sides. */
 const WORKED_OUT = 6;
 
 /** Adds, where one side's offset could be the other's in part, the fit that shares it between both; one that does already is put in its plainest words. */
-function withShared(fits: readonly Fit[], search: DecoderSearch, costOf: (fit: Fit) => number): readonly Fit[] {
+function withShared(fits: readonly Fit[], decoderSearch: DecoderSearch, costOf: (fit: Fit) => number): readonly Fit[] {
   if (fits.length > WORKED_OUT) return fits;
   return fits.flatMap((fit) => {
     const sides = fit.hidden().inseparable.some((pair) => pair.every((block) => block === 'reference' || block === 'body'));
     if (!sides) return [fit];
-    const shared = search.shared(fit, costOf);
-    if (!search.problem.criteria.fits(shared.squaredError, shared.count)) return [fit];
+    const shared = decoderSearch.shared(fit, costOf);
+    if (!decoderSearch.problem.criteria.fits(shared.squaredError, shared.count)) return [fit];
     return fit.bodyTurn === null && fit.referenceTurn === null ? [shared] : [fit, shared];
   });
 }
@@ -118,7 +98,7 @@ const TURN_MATRICES = Array.from({ length: TURN_COUNT }, (_, turn) => turnMatrix
 
 function runnerUpOf({ decoder, index, pair, squaredError, count }: Miss, chooser: StatementChooser, sigma: number, unit: AngleUnit, claim: Claim): RunnerUp | null {
   const [bodyTurn, referenceTurn] = [Math.floor(pair / TURN_COUNT), pair % TURN_COUNT];
-  const fit: Fit = { decoder, index, bodyTurn, referenceTurn, b: TURN_MATRICES[bodyTurn]!, a: TURN_MATRICES[inverse(referenceTurn)]!, ...AT_REST, squaredError, count, hidden: () => NOTHING_HIDDEN };
+  const fit: Fit = { decoder, index, bodyTurn, referenceTurn, b: TURN_MATRICES[bodyTurn]!, a: TURN_MATRICES[inverse(referenceTurn)]!, place: AT_REST, ...AT_REST, squaredError, count, hidden: () => NOTHING_HIDDEN };
   const [choice] = chooser.choices(fit, 0, 1);
   if (!choice) return null;
   const rms = Math.sqrt(squaredError / count);

@@ -8,7 +8,6 @@ import { ReferenceRecording } from './fit/motion.ts';
 import type { Identification } from './identification.ts';
 import { decodersFor } from './lattice/decoders.ts';
 import { DecoderSearch } from './search/decoder-search.ts';
-import { search } from './search/search.ts';
 
 export interface AttitudeIdentificationInput {
   /** Attitudes that are trusted, flat, as their convention lists them. */
@@ -55,7 +54,7 @@ export function identifyAttitudes(input: AttitudeIdentificationInput): Identific
     recording: new ReferenceRecording(matrices, input.times ?? null),
     criteria: new Criteria(sigma),
   });
-  return assemble(search(decoderSearch), decoderSearch, {
+  return assemble(decoderSearch, {
     claim: { stated: stated ?? null, representation: observed.representation, frame, mirrored },
     reference: reference.convention, standard, unit: noise.unit,
   });

@@ -78,6 +78,7 @@ export class StatementChooser {
   readonly #claim: Claim;
   readonly #ordered = new Map<Decoder, { readonly statement: Statement; readonly cost: number }[]>();
 
+  readonly #leastCosts = new Map<Decoder, Map<number, number>>();
   readonly #statedBody: number;
   readonly #statedReference: number;
 
@@ -86,6 +87,25 @@ export class StatementChooser {
     const { stated, frame } = claim;
     this.#statedBody = stated ? turnOfSet(BODY_SETS_BY_TURN, stated.body) : IDENTITY_TURN;
     this.#statedReference = stated && !frame ? turnOfSet(REFERENCE_SETS, stated.reference) : IDENTITY_TURN;
+  }
+
+  /** Fewest edits with two turns, null standing for an offset of no size; Infinity where no statement is possible. */
+  leastCost(decoder: Decoder, bodyTurn: number | null, referenceTurn: number | null): number {
+    const key = (bodyTurn ?? TURN_COUNT) * (TURN_COUNT + 1) + (referenceTurn ?? TURN_COUNT);
+    let costs = this.#leastCosts.get(decoder);
+    if (!costs) this.#leastCosts.set(decoder, costs = new Map());
+    const known = costs.get(key);
+    if (known !== undefined) return known;
+    let least = Infinity;
+    for (const { statement: { left, right }, cost } of this.#statements(decoder)) {
+      const sides = (bodyTurn === null ? 1 : 0) + (referenceTurn === null ? 1 : 0);
+      if (cost + sides >= least) break;
+      const bodies = bodyTurn === null ? this.#statedBody : product(left, bodyTurn);
+      const references = referenceTurn === null ? this.#statedReference : product(right, referenceTurn);
+      for (const sets of this.#setPairs(bodies, references)) least = Math.min(least, cost + sides + sets.cost);
+    }
+    costs.set(key, least);
+    return least;
   }
 
   /**

@@ -20,6 +20,8 @@ export interface Motion {
 
 /** Interpolation worse than this part of the steps themselves, and the attitudes jump. */
 const JUMP = 0.02;
+/** Samples that it takes to measure a quintic. */
+const ENOUGH = 11;
 /** A step longer than this many median ones is a gap: nothing is interpolated across it. */
 const GAP = 3.5;
 
@@ -32,6 +34,9 @@ export class ReferenceRecording {
   readonly step: number;
   readonly #middleVariance: number;
   readonly #nodes = new Float64Array(STENCIL);
+  /** Nodes less the time that the weights are for, and how many. */
+  readonly #places = new Float64Array(STENCIL);
+  #weighed = 0;
   readonly #weights = { value: new Float64Array(STENCIL), derivative: new Float64Array(STENCIL) };
 
   /** @param times - s, or null; times that do not increase are taken for none. */
@@ -42,12 +47,12 @@ export class ReferenceRecording {
     this.step = this.times ? medianStep(this.times) : 0;
     this.#middleVariance = this.times ? this.#measureInterpolation() : 0;
     // Attitudes that jump from sample to sample have no rate, and nothing lies between them.
-    if (this.times && this.#middleVariance > JUMP ** 2 * this.#stepVariance()) this.times = null;
+    if (this.times && this.count >= ENOUGH && this.#middleVariance > JUMP ** 2 * this.#stepVariance()) this.times = null;
   }
 
-  /** Longest lag that is looked for, s, either way: two seconds, or less of a short recording. */
+  /** Longest lag that is considered, s, either way: two seconds, or half of a short recording. */
   get longestLag(): number {
-    return this.times ? Math.min(2, (this.times[this.count - 1]! - this.times[0]!) / 4) : 0;
+    return this.times ? Math.min(2, (this.times[this.count - 1]! - this.times[0]!) / 2) : 0;
   }
 
   at(lag: number): Motion {
@@ -87,7 +92,7 @@ export class ReferenceRecording {
     const gap = this.#nodes[nodes - 1]! - this.#nodes[0]! > GAP * (nodes - 1) * this.step;
     if (gap && !onSample) return -1;
     const { value, derivative } = this.#weights;
-    lagrange(this.#nodes, nodes, t, this.#weights);
+    this.#weigh(nodes, t);
     for (let k = 0; k < 9; k++) {
       let v = 0, d = 0;
       for (let n = 0; n < nodes; n++) {
@@ -102,13 +107,25 @@ export class ReferenceRecording {
     return Math.max(0, Math.min(1, (t - times[j]!) / (times[j + 1]! - times[j]!)));
   }
 
+  /** Weights for the nodes as they stand; those of the last time where the nodes lie about t as they did then. */
+  #weigh(nodes: number, t: number): void {
+    const slack = 1e-9 * this.step;
+    let same = this.#weighed === nodes;
+    for (let k = 0; same && k < nodes; k++) same = Math.abs(this.#nodes[k]! - t - this.#places[k]!) <= slack;
+    if (same) return;
+    for (let k = 0; k < nodes; k++) this.#places[k] = this.#nodes[k]! - t;
+    lagrange(this.#nodes, nodes, t, this.#weights);
+    this.#weighed = nodes;
+  }
+
   /**
    * Variance a component in the middle of a step: each sample is interpolated from those one, three and five steps away,
    * at twice the spacing, and a quintic's error falls by 2⁶; doubled for safety. What the reference carries of noise adds to it.
    */
   #measureInterpolation(): number {
-    if (this.count < 11) return this.count < 7 ? 0 : this.#measured([-3, -1, 1, 3], 16);
-    return this.#measured([-5, -3, -1, 1, 3, 5], 64);
+    if (this.count >= ENOUGH) return this.#measured([-5, -3, -1, 1, 3, 5], 64);
+    // Too few to skip samples: what the neighbours on either side predict, a good deal too large.
+    return this.count >= 3 ? this.#measured([-1, 1], 4) : JUMP * this.#stepVariance();
   }
 
   #measured(offsets: readonly number[], falls: number): number {
@@ -119,7 +136,7 @@ export class ReferenceRecording {
     for (let i = reach; i + reach < this.count; i += stride) {
       offsets.forEach((offset, n) => { this.#nodes[n] = this.times![i + offset]!; });
       if (this.#nodes[offsets.length - 1]! - this.#nodes[0]! > GAP * 2 * reach * this.step) continue;
-      lagrange(this.#nodes, offsets.length, this.times![i]!, this.#weights);
+      this.#weigh(offsets.length, this.times![i]!);
       for (let k = 0; k < 9; k++) {
         const predicted = offsets.reduce((total, offset, n) => total + this.#weights.value[n]! * this.matrices[9 * (i + offset) + k]!, 0);
         sum += (predicted - this.matrices[9 * i + k]!) ** 2;
@@ -174,6 +191,16 @@ function withSums(lag: number, samples: Int32Array, matrices: Float64Array, deri
     sumSquareRate += x * x + y * y + z * z;
   }
   return { lag, samples, matrices, derivatives, sumMatrix, sumBodyRate, sumReferenceRate, sumSquareRate, interpolationVariance };
+}
+
+/** The motion at some of its samples only. */
+export function thinned({ lag, samples, matrices, derivatives, interpolationVariance }: Motion, places: Int32Array): Motion {
+  const pick = (from: Float64Array): Float64Array => {
+    const to = new Float64Array(9 * places.length);
+    places.forEach((place, k) => to.set(from.subarray(9 * place, 9 * place + 9), 9 * k));
+    return to;
+  };
+  return withSums(lag, places.map((place) => samples[place]!), pick(matrices), derivatives && pick(derivatives), interpolationVariance);
 }
 
 /** ω = vee(C Ċᵀ), by its antisymmetric part: [ω×] = C Ċᵀ. */

@@ -1,10 +1,13 @@
 import { startForBody } from '../fit/both-sides.ts';
 import { Criteria } from '../fit/criteria.ts';
 import { momentsOf, squaredTurn, transposedMoments, type Moments } from '../fit/moments.ts';
-import type { Motion, ReferenceRecording } from '../fit/motion.ts';
+import { thinned, type Motion, type ReferenceRecording } from '../fit/motion.ts';
+import type { ScaledMoments } from '../fit/normal-equations.ts';
+import { pairScore, squaredError } from '../fit/scores.ts';
 import type { Decoder, Reader } from '../lattice/decoder.ts';
-import { AT_REST, keyOf, type Fit, type Place } from './fit.ts';
-import { fitDecoder, type DecoderFits } from './fit-decoder.ts';
+import { TURN_COUNT } from '../lattice/turns.ts';
+import { keyOf, type Fit, type Place } from './fit.ts';
+import { DecoderFitting, type Wanted } from './fit-decoder.ts';
 import { largestErrors } from './largest-error.ts';
 import { chordMismatch, chordSlack, numbersAt, variedSamples, type VariedSamples } from './samples.ts';
 import { shareOffset } from './shared-offsets.ts';
@@ -35,10 +38,24 @@ const NEWTON_STEPS = 6;
 /** Places followed for one decoder and one choice of free parameters. */
 const FOLLOWED = 3;
 
+/** So many samples are enough to tell a scale. */
+const FEWER = 4096;
+
+/** The samples that one lag leaves, with what is made of them. */
+interface Samples {
+  readonly motion: Motion;
+  readonly numbers: Float64Array;
+  /** An even selection, where there are many. */
+  readonly fewer: { readonly motion: Motion; readonly numbers: Float64Array } | null;
+  readonly varied: VariedSamples;
+  readonly criteria: Criteria;
+}
+
 /** Works on one decoder at a time, keeping what several of them share. */
 export class DecoderSearch {
   readonly problem: Problem;
-  readonly #motions = new Map<number, { readonly motion: Motion; readonly numbers: Float64Array; readonly varied: VariedSamples; readonly criteria: Criteria }>();
+  readonly #samples = new Map<number, Samples>();
+  readonly #turns = new Map<string, number>();
   readonly #moments = new Map<string, Moments | null>();
   readonly #readerIds = new Map<Reader, number>();
 
@@ -60,39 +77,46 @@ export class DecoderSearch {
 
   /** The discrete hypothesis of a decoder that comes nearest on the most varied samples. */
   nearestOnVaried(decoder: Decoder, index: number): Miss | null {
-    const { varied, numbers, criteria, motion } = this.#at(0);
+    const { varied, numbers, motion } = this.#at(0);
     const moments = momentsOf(decoder.reader, numbersAt(numbers, this.problem.width, varied.places), 1, { ...motion, matrices: varied.matrices, derivatives: null });
     if (!moments) return null;
-    const result = fitDecoder({ decoder, index, place: AT_REST, motion, moments: decoder.transposed ? transposedMoments(moments) : moments, scaled: null, startForBody: () => varied.matrices.slice(0, 9) }, criteria);
-    return result.nearestMiss && { decoder, index, count: moments.count, ...result.nearestMiss };
+    const own = decoder.transposed ? transposedMoments(moments) : moments;
+    let best = 0;
+    let most = -Infinity;
+    for (let pair = 0; pair < TURN_COUNT * TURN_COUNT; pair++) {
+      const score = pairScore(own.cross, pair);
+      if (score > most) [best, most] = [pair, score];
+    }
+    return { decoder, index, pair: best, squaredError: squaredError(own, most), count: own.count };
   }
 
-  fitAt(decoder: Decoder, index: number, place: Place): DecoderFits {
-    const { motion, numbers, varied, criteria } = this.#at(place.lag);
-    const none: DecoderFits = { fits: [], elsewhere: [], nearestMiss: null };
-    if (motion.samples.length === 0) return none;
-    const moments = this.#momentsAt(decoder, place.lag, place.scale);
-    if (!moments) return none;
-    let scaled = null;
-    if (decoder.reader.scalable) {
-      const up = this.#momentsAt(decoder, place.lag, place.scale * Math.exp(SCALE_STEP));
-      const down = this.#momentsAt(decoder, place.lag, place.scale * Math.exp(-SCALE_STEP));
-      if (up && down) scaled = { step: SCALE_STEP, up, down, squaredTurn: squaredTurn(decoder.reader, numbers, 1 / place.scale, moments.count, SCALE_STEP) };
-    }
-    return fitDecoder({
-      decoder, index, place, motion, moments, scaled,
+  /** A decoder with its sums at one place; null where it cannot be. */
+  fitting(decoder: Decoder, index: number, place: Place): DecoderFitting | null {
+    const { motion, numbers, varied, criteria, fewer } = this.#at(place.lag);
+    if (motion.samples.length === 0) return null;
+    const moments = this.#momentsAt(decoder, place, false);
+    if (!moments) return null;
+    const { scalable } = decoder.reader;
+    const withScale = scalable && (fewer === null || place.freed.includes('scale'));
+    return new DecoderFitting({
+      decoder, index, place,
+      sums: { motion, moments, scaled: withScale ? this.#scaledAt(decoder, place, false) : null },
+      scaleSums: () => {
+        const scaled = scalable && fewer ? this.#scaledAt(decoder, place, true) : null;
+        return scaled && { motion: fewer!.motion, moments: this.#momentsAt(decoder, place, true)!, scaled };
+      },
       startForBody: () => startForBody(this.#readVaried(decoder.reader, numbers, varied, 1 / place.scale)!, varied.matrices, varied.pairs, decoder.transposed),
     }, criteria);
   }
 
   /** Fits with a lag or a scale free, by Newton's steps from each place. */
-  follow(decoder: Decoder, index: number, places: readonly Place[]): Fit[] {
+  follow(decoder: Decoder, index: number, places: readonly Place[], wanted: Wanted): Fit[] {
     const settled = new Map<string, Fit>();
     const kinds = new Map<string, Place[]>();
     for (const place of places) kinds.set(place.freed.join(), [...(kinds.get(place.freed.join()) ?? []), place]);
     for (const starts of kinds.values()) {
       for (const start of this.#distinct(starts).slice(0, FOLLOWED)) {
-        for (const fit of this.#settle(decoder, index, start)) settled.set(keyOf(fit), fit);
+        for (const fit of this.#settle(decoder, index, start, wanted)) settled.set(keyOf(fit), fit);
       }
     }
     return [...settled.values()];
@@ -102,21 +126,21 @@ export class DecoderSearch {
   largestErrors(fits: readonly Fit[]): Map<Fit, number> {
     const groups = new Map<string, Fit[]>();
     for (const fit of fits) {
-      const key = `${this.#idOf(fit.decoder.reader)}/${fit.lag}/${fit.scale}`;
+      const key = `${this.#idOf(fit.decoder.reader)}/${fit.place.lag}/${fit.scale}`;
       groups.set(key, [...(groups.get(key) ?? []), fit]);
     }
     const errors = new Map<Fit, number>();
     for (const group of groups.values()) {
-      const { motion, numbers } = this.#at(group[0]!.lag);
-      largestErrors(group, numbers, motion.matrices).forEach((error, k) => errors.set(group[k]!, error));
+      const { motion, numbers } = this.#at(group[0]!.place.lag);
+      largestErrors(group, numbers, motion).forEach((error, k) => errors.set(group[k]!, error));
     }
     return errors;
   }
 
   /** The same fit with its offset shared between both sides in the fewest words, where the data do not say which side it is on. */
   shared(fit: Fit, costOf: (fit: Fit) => number): Fit {
-    const { motion, criteria } = this.#at(fit.lag);
-    return shareOffset(fit, this.#momentsAt(fit.decoder, fit.lag, fit.scale)!, motion, criteria.variance, costOf);
+    const { motion, criteria } = this.#at(fit.place.lag);
+    return shareOffset(fit, this.#momentsAt(fit.decoder, fit.place, false)!, motion, criteria.variance, costOf);
   }
 
   #idOf(reader: Reader): number {
@@ -125,18 +149,41 @@ export class DecoderSearch {
     return id;
   }
 
-  #settle(decoder: Decoder, index: number, start: Place): Fit[] {
-    let place = start;
+  #settle(decoder: Decoder, index: number, start: Place, wanted: Wanted): Fit[] {
+    let place = this.#snapped(start);
     let fits: Fit[] = [];
     for (let step = 0; step < NEWTON_STEPS; step++) {
       if (!this.#sensible(place)) return [];
-      const result = this.fitAt(decoder, index, place);
-      fits = result.fits;
-      const next = this.#distinct(result.elsewhere.filter(({ freed }) => freed.join() === place.freed.join()))[0];
+      const fitting = this.fitting(decoder, index, place);
+      if (!fitting) return [];
+      fitting.fitAxisSets(wanted);
+      fitting.fitOffsets(wanted);
+      fits = fitting.fits;
+      const next = fitting.proposals.map((proposal) => proposal.place).find(({ freed }) => freed.join() === place.freed.join());
       if (!next || this.#same(next, place)) break;
-      place = next;
+      place = this.#snapped(next);
     }
     return fits;
+  }
+
+  /**
+   * Lags are held at whole steps, short enough that what is beyond the slope is a small part of the noise: decoders that
+   * ask for nearly the same lag then share one motion.
+   */
+  #snapped(place: Place): Place {
+    const step = this.#reach / this.#rate;
+    return { ...place, lag: Number.isFinite(step) ? Math.round(place.lag / step) * step : 0 };
+  }
+
+  /** Turn, rad, over which a rotation is a straight line to a twentieth of the noise. */
+  get #reach(): number {
+    return Math.sqrt(0.04 * Math.sqrt(this.problem.criteria.variance));
+  }
+
+  /** Root mean square rate, rad/s. */
+  get #rate(): number {
+    const { motion } = this.#at(0);
+    return Math.sqrt(motion.sumSquareRate / Math.max(1, motion.samples.length));
   }
 
   #sensible({ lag, scale }: Place): boolean {
@@ -144,10 +191,7 @@ export class DecoderSearch {
   }
 
   #same(a: Place, b: Place): boolean {
-    const { motion } = this.#at(0);
-    const rate = Math.sqrt(motion.sumSquareRate / Math.max(1, motion.samples.length));
-    const fine = 1e-3 * Math.sqrt(this.problem.criteria.variance);
-    return Math.abs(a.lag - b.lag) * rate <= fine && Math.abs(Math.log(a.scale / b.scale)) <= fine;
+    return Math.abs(a.lag - b.lag) * this.#rate <= this.#reach && Math.abs(Math.log(a.scale / b.scale)) <= this.#reach;
   }
 
   #distinct(places: readonly Place[]): Place[] {
@@ -156,34 +200,52 @@ export class DecoderSearch {
     return kept;
   }
 
-  #at(lag: number) {
-    let at = this.#motions.get(lag);
+  #at(lag: number): Samples {
+    let at = this.#samples.get(lag);
     if (!at) {
       const { recording, numbers, width, sigma, criteria } = this.problem;
       const motion = recording.at(lag);
-      const all = motion.samples.length === recording.count;
+      const used = motion.samples.length === recording.count ? numbers : numbersAt(numbers, width, motion.samples);
       at = {
-        motion,
-        numbers: all ? numbers : numbersAt(numbers, width, motion.samples),
+        motion, numbers: used,
+        fewer: motion.samples.length > FEWER ? this.#thinned(motion, used) : null,
         varied: variedSamples(motion),
         criteria: motion.interpolationVariance === 0 ? criteria : new Criteria(sigma, motion.interpolationVariance),
       };
-      this.#motions.set(lag, at);
+      this.#samples.set(lag, at);
     }
     return at;
   }
 
-  #momentsAt(decoder: Decoder, lag: number, scale: number): Moments | null {
-    const plain = this.#shared(decoder.reader, lag, scale, false);
-    return decoder.transposed && plain ? this.#shared(decoder.reader, lag, scale, true) : plain;
+  #thinned(motion: Motion, numbers: Float64Array) {
+    const stride = Math.ceil(motion.samples.length / FEWER);
+    const places = Int32Array.from({ length: Math.ceil(motion.samples.length / stride) }, (_, k) => k * stride);
+    return { motion: thinned(motion, places), numbers: numbersAt(numbers, this.problem.width, places) };
   }
 
-  #shared(reader: Reader, lag: number, scale: number, transposed: boolean): Moments | null {
-    const key = `${this.#idOf(reader)}/${lag}/${scale}/${transposed}`;
+  #scaledAt(decoder: Decoder, place: Place, few: boolean): ScaledMoments | null {
+    const { motion, numbers, fewer } = this.#at(place.lag);
+    const up = this.#momentsAt(decoder, { ...place, scale: place.scale * Math.exp(SCALE_STEP) }, few);
+    const down = this.#momentsAt(decoder, { ...place, scale: place.scale * Math.exp(-SCALE_STEP) }, few);
+    if (!up || !down) return null;
+    const key = `${this.#idOf(decoder.reader)}/${place.lag}/${place.scale}/${few}`;
+    let turn = this.#turns.get(key);
+    if (turn === undefined) this.#turns.set(key, turn = squaredTurn(decoder.reader, few ? fewer!.numbers : numbers, 1 / place.scale, (few ? fewer!.motion : motion).samples.length, SCALE_STEP));
+    return { step: SCALE_STEP, up, down, squaredTurn: turn };
+  }
+
+  #momentsAt({ reader, transposed }: Decoder, { lag, scale }: Place, few: boolean): Moments | null {
+    const plain = this.#shared(reader, lag, scale, few, false);
+    return transposed && plain ? this.#shared(reader, lag, scale, few, true) : plain;
+  }
+
+  #shared(reader: Reader, lag: number, scale: number, few: boolean, transposed: boolean): Moments | null {
+    const key = `${this.#idOf(reader)}/${lag}/${scale}/${few}/${transposed}`;
     let moments = this.#moments.get(key);
     if (moments === undefined) {
-      const { motion, numbers } = this.#at(lag);
-      moments = transposed ? transposedMoments(this.#shared(reader, lag, scale, false)!) : momentsOf(reader, numbers, 1 / scale, motion);
+      const at = this.#at(lag);
+      const { motion, numbers } = few ? at.fewer! : at;
+      moments = transposed ? transposedMoments(this.#shared(reader, lag, scale, few, false)!) : momentsOf(reader, numbers, 1 / scale, motion);
       this.#moments.set(key, moments);
     }
     return moments;

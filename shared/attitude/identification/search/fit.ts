@@ -22,6 +22,8 @@ export interface Fit {
   readonly referenceTurn: number | null;
   readonly b: Float64Array;
   readonly a: Float64Array;
+  /** Where the sums were taken; the lag and the scale lie within a short step of it. */
+  readonly place: Place;
   readonly lag: number;
   readonly scale: number;
   readonly freed: readonly Block[];

@@ -25,9 +25,9 @@ export class LagSearch {
     this.#recording = recording;
     this.#numbers = numbers;
     this.#width = width;
-    // Samples whose lagged times all lie inside the recording.
-    const longest = recording.longestLag;
+    // Samples whose lagged times all lie inside the recording, in the middle half of a short one.
     const times = recording.times!;
+    const longest = Math.min(recording.longestLag, (times[times.length - 1]! - times[0]!) / 4);
     const inner = [...times.keys()].filter((i) => times[i]! - longest >= times[0]! && times[i]! + longest <= times[times.length - 1]!);
     const matrices = new Float64Array(9 * inner.length);
     inner.forEach((i, k) => matrices.set(recording.matrices.subarray(9 * i, 9 * i + 9), 9 * k));

@@ -1,20 +1,21 @@
 import { multiply } from '../fit/small-matrix.ts';
+import type { Motion } from '../fit/motion.ts';
 import { TURNS } from '../lattice/turns.ts';
 import type { Fit } from './fit.ts';
 
 const BLOCK = 512;
 
 /**
- * Largest error angle of each fit, rad, over the samples. The fits share one decoder's reader, one lag and one scale.
+ * Largest error angle of each fit, rad, over the samples. The fits share one reader, one scale and the motion.
  *
- * @param numbers - of the used samples. @param reference - C of the same samples.
+ * @param numbers - of the samples that the motion uses.
  */
-export function largestErrors(fits: readonly Fit[], numbers: Float64Array, reference: Float64Array): number[] {
+export function largestErrors(fits: readonly Fit[], numbers: Float64Array, { matrices: reference, derivatives }: Motion): number[] {
   const { reader } = fits[0]!.decoder;
   const count = reference.length / 9;
   const m = new Float64Array(9 * BLOCK);
   const largest = new Float64Array(fits.length);
-  const errors = fits.map(squaredErrorOf);
+  const errors = fits.map((fit) => squaredErrorOf(fit, derivatives));
   for (let from = 0; from < count; from += BLOCK) {
     const size = Math.min(BLOCK, count - from);
     reader.read(numbers.subarray(reader.width * from, reader.width * (from + size)), size, 1 / fits[0]!.scale, m);
@@ -29,11 +30,12 @@ export function largestErrors(fits: readonly Fit[], numbers: Float64Array, refer
 
 type SquaredError = (m: Float64Array, at: number, c: Float64Array, cAt: number) => number;
 
-/** |M − B C A|². */
-function squaredErrorOf({ decoder, bodyTurn, referenceTurn, b, a }: Fit): SquaredError {
+/** |M − B C A|², C by its slope where the lag is a little off the motion's. */
+function squaredErrorOf({ decoder, bodyTurn, referenceTurn, b, a, lag, place: held }: Fit, derivatives: Float64Array | null): SquaredError {
+  const shift = derivatives ? lag - held.lag : 0;
   const place = (k: number): number => (decoder.transposed ? 3 * (k % 3) + Math.floor(k / 3) : k);
   const from = Uint8Array.from({ length: 9 }, (_, k) => place(k));
-  if (bodyTurn !== null && referenceTurn !== null) {
+  if (bodyTurn !== null && referenceTurn !== null && shift === 0) {
     const [body, reference] = [TURNS[bodyTurn]!, TURNS[referenceTurn]!];
     const to = Uint8Array.from({ length: 9 }, (_, k) => 3 * body.column[Math.floor(k / 3)]! + reference.column[k % 3]!);
     const sign = Float64Array.from({ length: 9 }, (_, k) => body.sign[Math.floor(k / 3)]! * reference.sign[k % 3]!);
@@ -46,8 +48,10 @@ function squaredErrorOf({ decoder, bodyTurn, referenceTurn, b, a }: Fit): Square
       return sum;
     };
   }
+  const shifted = new Float64Array(9);
   return (m, at, c, cAt) => {
-    const expected = multiply(multiply(b, c.subarray(cAt, cAt + 9)), a);
+    for (let k = 0; k < 9; k++) shifted[k] = c[cAt + k]! - (shift === 0 ? 0 : shift * derivatives![cAt + k]!);
+    const expected = multiply(multiply(b, shifted), a);
     let sum = 0;
     for (let k = 0; k < 9; k++) sum += (m[at + from[k]!]! - expected[k]!) ** 2;
     return sum;
