@@ -55,17 +55,20 @@ function motionSentences({ motion, sigma, frame }: Seen): string[] {
 
 const heading = (c: Float64Array): string => `${((Math.atan2(c[1]!, c[0]!) * DEG + 360) % 360).toFixed(1).padStart(5, '0')}°`;
 
-function constantNumbers({ numbers, width, sigma }: Seen): string[] {
+function constantNumbers({ numbers, width, sigma, choices }: Seen): string[] {
+  // Noise of a number, as the plainest explanation reads it; angles near lock scatter more, and are then not called zero.
+  const [convention] = choices.map((choice) => choice.convention);
+  const noise = convention && 'unit' in convention && convention.unit === 'deg' ? sigma * DEG : sigma;
   const count = numbers.length / width;
   if (count < 2) return [];
   const zero: number[] = [];
   for (let k = 0; k < width; k++) {
     let largest = 0;
     for (let i = 0; i < count; i++) largest = Math.max(largest, Math.abs(numbers[width * i + k]!));
-    if (largest <= Math.max(6 * sigma, 1e-9)) zero.push(k + 1);
+    if (largest <= Math.max(6 * noise, 1e-9)) zero.push(k + 1);
   }
   if (zero.length === 0 || zero.length === width) return zero.length === 0 ? [] : ['All numbers are zero throughout: any reading of them is the identity.'];
-  return [`Number${zero.length > 1 ? 's' : ''} ${zero.join(' and ')} of each attitude ${zero.length > 1 ? 'are' : 'is'} always zero: ${zero.length > 1 ? 'their' : 'its'} sign, unit and place in the sequence do not show.`];
+  return [`Number${zero.length > 1 ? 's' : ''} ${zero.join(' and ')} of each attitude ${zero.length > 1 ? 'are' : 'is'} zero throughout${sigma > 0 ? ', within the noise' : ''}: ${zero.length > 1 ? 'their' : 'its'} sign, unit and place in the sequence do not show.`];
 }
 
 /** Parameters that could hide, and those that could be one another. */

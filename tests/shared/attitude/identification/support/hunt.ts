@@ -35,6 +35,9 @@ export interface Choices {
 
 export const EVERYTHING: Choices = { kinds: MOTION_KINDS, counts: [6, 8, 12, 20, 50, 120, 300, 2000], mistakes: 2, overstated: [1, 1, 2, 5], sigmas: [0, 0.01 * DEG, 0.05 * DEG, 0.2 * DEG] };
 
+/** Two mistakes in a recording that shows them. */
+export const VARIED_PAIRS: Choices = { ...EVERYTHING, kinds: ['varied'], counts: [2000], overstated: [1], sigmas: [0, 0.05 * DEG] };
+
 export function caseOf(seed: number, choices: Choices): Case {
   const noise = new Noise(seed);
   const stated: Statement = { convention: noise.pick(STATED) };
@@ -94,5 +97,5 @@ export function judged(each: Case): { readonly verdict: Verdict; readonly identi
   const recording = recordingOf(each);
   const started = performance.now();
   const identification = identified(each, recording);
-  return { verdict: verdictOf(each.truth, identification, toleranceFor(each, recording)), identification, milliseconds: performance.now() - started };
+  return { verdict: verdictOf(each.truth, identification, toleranceFor(each, recording), recording.reference), identification, milliseconds: performance.now() - started };
 }

@@ -12,8 +12,8 @@ const GENERIC: readonly Matrix[] = (() => {
  * How far, rad, two statements are from being the same numbers for all attitudes: the largest angle between an attitude
  * and what the second statement makes of the numbers that the first lists for it. Lags aside.
  */
-export function distance(truth: Statement, claimed: Statement): number {
-  return Math.max(...GENERIC.map((c) => {
+export function distance(truth: Statement, claimed: Statement, attitudes: readonly Matrix[] = GENERIC): number {
+  return Math.max(...attitudes.map((c) => {
     const numbers = listed(truth, c);
     if (numbers.length !== widthOf(claimed)) return Math.PI;
     return angleBetween(c, meaning(claimed, numbers));
