@@ -19,6 +19,7 @@ import { Quota } from './domain/limits/quota.ts';
 import { SessionTokens } from './domain/sessions/session-tokens.ts';
 import { sessionCookie } from './http/cookie.ts';
 import { createRateLimiter } from './http/rate-limiter.ts';
+import { Identifier } from './identification/identifier.ts';
 
 export interface ServiceOptions {
   readonly config: Config;
@@ -32,6 +33,7 @@ export async function createServices({ config, logger, clock = Date.now }: Servi
   const database: Database = await connect(path.join(config.dataDirectory, 'dextral.sqlite'));
   const apiKeys = apiKeysRepository(database);
   const crossChecker = new CrossChecker();
+  const identifier = new Identifier();
   const usage = usageRepository(database);
   return {
     config, logger, clock, database, apiKeys,
@@ -48,8 +50,10 @@ export async function createServices({ config, logger, clock = Date.now }: Servi
     tokens: new SessionTokens(config.sessionSecret),
     cookie: sessionCookie(config.publicUrl),
     crossChecker,
+    identifier,
     async close() {
       await crossChecker.close();
+      await identifier.close();
       await disconnect(database);
     },
   };

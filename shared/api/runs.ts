@@ -2,6 +2,7 @@ import { z } from 'zod';
 import { pageQuery, timestamp } from './common.ts';
 import { conventionFacets, conventionReference } from './convention.ts';
 import { endpoint } from './endpoint.ts';
+import { identification } from './identify.ts';
 import { attitudeRows } from './numbers.ts';
 
 const toleranceUnit = z.enum(['deg', 'rad', 'arcsec']);
@@ -22,6 +23,8 @@ const listed = z.strictObject({ convention: conventionReference, attitudes: atti
 
 export const verifyInput = z.strictObject({
   expected: listed, actual: listed, tolerance,
+  diagnose: z.boolean().optional().meta({ description: 'Where the verdict is fail, also say which mistakes would explain the actual attitudes. The noise is taken as a fifth of the tolerance.' }),
+  times: z.array(z.number({ error: 'must be a finite number' })).optional().meta({ description: 'Seconds, increasing, one for each attitude; with them a diagnosis can find a time lag.' }),
   label: label.optional().meta({ description: 'What was checked; runs can be found by it.' }),
   commit: commit.optional().meta({ description: 'The commit of the code that computed the actual attitudes.' }),
 }).meta({ id: 'VerifyInput' });
@@ -29,6 +32,7 @@ export const verifyInput = z.strictObject({
 export const verifyOutput = z.strictObject({
   verdict, run: z.string().meta({ description: 'Id of the stored run.' }), count: z.int(), failed: z.int(), worst, statistics, failures,
   summary: z.string().meta({ description: 'The worst error in a plain sentence.' }), engine: z.string(),
+  diagnosis: identification.optional(),
 }).meta({ id: 'VerifyOutput' });
 
 export const verifyEndpoint = endpoint({
@@ -49,6 +53,7 @@ export const run = z.strictObject({
   key: z.strictObject({ id: z.string(), name: z.string() }).nullable(), person: z.strictObject({ id: z.string(), name: z.string() }).nullable(),
   count: z.int(), failed: z.int(), tolerance, worst, statistics,
   expected: conventionFacets, actual: conventionFacets, failures, summary: z.string(), engine: z.string(),
+  diagnosis: identification.optional().meta({ description: 'Where one was asked for and the verdict is fail; at most the ten plainest explanations are kept.' }),
 }).meta({ id: 'Run' });
 
 export const listRunsEndpoint = endpoint({

@@ -4,6 +4,7 @@ import type { Endpoint } from './endpoint.ts';
 import { healthEndpoint } from './health.ts';
 import { listHistoryEndpoint } from './history.ts';
 import { issueKeyEndpoint, listKeysEndpoint, revokeKeyEndpoint } from './keys.ts';
+import { identifyEndpoint } from './identify.ts';
 import { ratesEndpoint } from './rates.ts';
 import { getRunEndpoint, getRunJUnitEndpoint, listRunsEndpoint, verifyEndpoint } from './runs.ts';
 import { currentSessionEndpoint, signInEndpoint, signOutEndpoint } from './sessions.ts';
@@ -14,6 +15,7 @@ export const ENDPOINTS: readonly Endpoint[] = [
   convertEndpoint,
   ratesEndpoint,
   verifyEndpoint,
+  identifyEndpoint,
   listRunsEndpoint,
   getRunJUnitEndpoint,
   getRunEndpoint,

@@ -104,6 +104,7 @@ export type Convention =
   | MrpConvention
   | GibbsConvention;
 
+export const REPRESENTATIONS = ['euler', 'quaternion', 'dcm', 'rotation-vector', 'axis-angle', 'mrp', 'gibbs'] as const satisfies readonly Convention['representation'][];
 export type Representation = Convention['representation'];
 
 /** Count of numbers that one attitude takes in each representation. */

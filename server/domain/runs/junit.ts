@@ -8,7 +8,7 @@ export function runAsJUnit(run: RunDocument): string {
   const suite = run.label ?? 'Attitude verification';
   const within = `within ${run.tolerance.angle} ${run.tolerance.unit}`;
   const cases = [
-    testCase(suite, `all ${run.count} attitudes ${within}`, run.verdict === 'fail' ? `${run.failed} of ${run.count} attitudes are off by more. ${run.summary}` : null),
+    testCase(suite, `all ${run.count} attitudes ${within}`, run.verdict === 'fail' ? `${run.failed} of ${run.count} attitudes are off by more. ${run.summary}${diagnosisOf(run)}` : null),
     ...run.failures.map(({ index, angle }) => testCase(suite, `attitude ${index} ${within}`, `off by ${angle} ${run.tolerance.unit}`)),
   ];
   const failed = (run.verdict === 'fail' ? 1 : 0) + run.failures.length;
@@ -25,6 +25,12 @@ ${cases.join('\n')}
   </testsuite>
 </testsuites>
 `;
+}
+
+function diagnosisOf({ diagnosis }: RunDocument): string {
+  const [plainest] = diagnosis?.explanations ?? [];
+  if (!diagnosis || !plainest || plainest.edits.length === 0) return '';
+  return ` ${diagnosis.outcome === 'unique' ? 'Explained by' : `The plainest of ${diagnosis.remaining} explanations`}: ${plainest.edits.join('; ')}.`;
 }
 
 function testCase(suite: string, name: string, failure: string | null): string {

@@ -1,3 +1,4 @@
+import type { IdentificationDocument } from '#shared/api/identify.ts';
 import type { RunDocument } from '#shared/api/runs.ts';
 import type { Convention } from '#shared/attitude/convention.ts';
 import type { RunRow } from '#server/db/repositories/runs.ts';
@@ -15,6 +16,7 @@ export interface RunDetail {
   readonly failures: readonly { readonly index: number; readonly angle: number }[];
   readonly summary: string;
   readonly engine: string;
+  readonly diagnosis?: IdentificationDocument;
 }
 
 export function presentRun(row: RunRow): RunDocument {
@@ -24,6 +26,6 @@ export function presentRun(row: RunRow): RunDocument {
     key: row.keyId === null ? null : { id: row.keyId, name: row.keyName ?? '' },
     person: row.personId === null ? null : { id: row.personId, name: row.personName ?? '' },
     count: row.count, failed: row.failed,
-    ...(detail as unknown as Pick<RunDocument, 'tolerance' | 'worst' | 'statistics' | 'expected' | 'actual' | 'failures' | 'summary' | 'engine'>),
+    ...(detail as unknown as Pick<RunDocument, 'tolerance' | 'worst' | 'statistics' | 'expected' | 'actual' | 'failures' | 'summary' | 'engine' | 'diagnosis'>),
   };
 }

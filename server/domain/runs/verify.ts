@@ -7,9 +7,12 @@ import { verifyAttitudes, type StatedAttitudes, type Verification } from '#share
 import { ENGINE } from '../attitude/engine.ts';
 import { readAttitudes } from '../attitude/read-attitudes.ts';
 import { pointingInto } from '../attitude/refuse-attitudes.ts';
+import { readTimes } from '../attitude/read-times.ts';
 import { resolveConvention } from '../conventions/resolve-convention.ts';
 import { DomainError } from '../errors.ts';
 import type { Meter } from '../meter.ts';
+import type { Identifier } from '#server/identification/identifier.ts';
+import { diagnose } from './diagnose.ts';
 import type { RunDetail } from './present-run.ts';
 
 const PER_RADIAN = { rad: 1, deg: 180 / Math.PI, arcsec: (180 * 3600) / Math.PI } as const;
@@ -25,8 +28,15 @@ export interface VerifiedRun {
   readonly detail: RunDetail;
 }
 
+export interface VerifyContext {
+  readonly identifier: Pick<Identifier, 'identify'>;
+}
+
+/** Explanations that a stored run keeps; how many there are is kept whole. */
+const KEPT = 10;
+
 /** Compares expected and actual attitudes; the run is stored by whoever records the call. */
-export function verify(request: VerifyInput, meter: Meter): { answer: VerifyOutput; run: VerifiedRun } {
+export async function verify({ identifier }: VerifyContext, request: VerifyInput, meter: Meter): Promise<{ answer: VerifyOutput; run: VerifiedRun }> {
   if (request.expected.attitudes.length !== request.actual.attitudes.length) {
     throw new DomainError('count-mismatch', `${request.expected.attitudes.length} expected attitudes cannot be compared with ${request.actual.attitudes.length} actual ones.`, [{ pointer: '/actual/attitudes', message: `must hold as many attitudes as /expected/attitudes, ${request.expected.attitudes.length}` }]);
   }
@@ -34,16 +44,21 @@ export function verify(request: VerifyInput, meter: Meter): { answer: VerifyOutp
   const expected = read(request.expected, '/expected');
   const actual = read(request.actual, '/actual');
   const { tolerance } = request;
+  if (request.times) readTimes(request.times, request.actual.attitudes.length, '/actual/attitudes');
   const scale = PER_RADIAN[tolerance.unit];
   const result = pointingInto('/actual/attitudes', () => verifyAttitudes(expected, actual, tolerance.angle / scale));
 
-  const detail = detailOf(result, tolerance, scale, expected.convention, actual.convention);
+  const diagnosis = request.diagnose && result.failed > 0 ? await diagnose(identifier, expected, actual, request) : null;
+  const detail = {
+    ...detailOf(result, tolerance, scale, expected.convention, actual.convention),
+    ...(diagnosis ? { diagnosis: { ...diagnosis, explanations: diagnosis.explanations.slice(0, KEPT) } } : {}),
+  };
   const run: VerifiedRun = {
     id: randomUUID(), label: request.label ?? null, commitId: request.commit ?? null,
     verdict: result.failed > 0 ? 'fail' : 'pass', count: result.count, failed: result.failed, detail,
   };
   const { worst, statistics, failures, summary, engine } = detail;
-  return { run, answer: { verdict: run.verdict, run: run.id, count: run.count, failed: run.failed, worst: { ...worst, axisBody: [...worst.axisBody] }, statistics, failures: [...failures], summary, engine } };
+  return { run, answer: { verdict: run.verdict, run: run.id, count: run.count, failed: run.failed, worst: { ...worst, axisBody: [...worst.axisBody] }, statistics, failures: [...failures], summary, engine, ...(diagnosis ? { diagnosis } : {}) } };
 }
 
 function read({ convention: reference, attitudes }: VerifyInput['expected'], pointer: string): StatedAttitudes {

@@ -7,8 +7,8 @@ import type { Services } from '#server/services.ts';
 import { mount } from '../mount.ts';
 
 export function runRoutes(services: Services, router: Router): void {
-  mount(services, router, verifyEndpoint)(({ body, meter, call }) => {
-    const { answer, run } = verify(body, meter);
+  mount(services, router, verifyEndpoint)(async ({ body, meter, call }) => {
+    const { answer, run } = await verify(services, body, meter);
     call.run = run;
     return answer;
   });

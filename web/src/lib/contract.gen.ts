@@ -66,6 +66,28 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/identify": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /**
+         * Find every convention that a box’s numbers may follow
+         * @description Compares the numbers with trusted attitudes under every reading, axis set, order, sign and unit, and with constant offsets, a time lag and a scale. Says what explains them, what else would, what the data cannot tell, and which attitude to test next.
+         *
+         *     Roles: administrator, integrator, engineer.
+         */
+        post: operations["identifyConvention"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/runs": {
         parameters: {
             query?: never;
@@ -412,6 +434,20 @@ export interface components {
             lastUsedAt: string | null;
             revokedAt: string | null;
         };
+        /** @description A constant rotation T = R(axis, angle) on one side: the numbers mean C T (reference) or T C (body) where C is the true attitude. */
+        ConstantOffset: {
+            /** @enum {string} */
+            side: "reference" | "body";
+            /** @description Unit axis: in north, east, down (or the named frame) for the reference side, in forward, right, down for the body side. */
+            axis: [
+                number,
+                number,
+                number
+            ];
+            angle: number;
+            /** @enum {string} */
+            unit: "deg" | "rad";
+        };
         /** @description Every facet, a preset id, or a published interface version. */
         Convention: components["schemas"]["ConventionFacets"] | components["schemas"]["PresetReference"] | components["schemas"]["InterfaceReference"];
         /** @description A convention with every facet stated. Nothing has a default. */
@@ -636,6 +672,30 @@ export interface components {
                 maxAngleRad: number;
             }[];
         };
+        /** @description An attitude to put the box in that tells remaining explanations apart. */
+        DiscriminatingAttitude: {
+            /** @description In the reference’s convention. */
+            attitude: number[];
+            reading: string;
+            separates: {
+                answers: number;
+                explanations: number;
+                /** @description What the box would list there, with the explanations, by their place, that say so. */
+                predictions: {
+                    numbers: number[];
+                    explanations: number[];
+                }[];
+            };
+        };
+        EquivalentStatement: {
+            convention: components["schemas"]["ConventionFacets"];
+            /**
+             * @description The numbers are those of half or of twice the rotation, or only the vector part of the quaternion.
+             * @enum {string}
+             */
+            numbersAre?: "half-angle" | "double-angle" | "vector-part";
+            constantOffset?: components["schemas"]["ConstantOffset"][];
+        };
         /** @description Of the error angles; percentiles by nearest rank. */
         ErrorStatistics: {
             rms: number;
@@ -644,6 +704,32 @@ export interface components {
             max: number;
             /** @enum {string} */
             unit: "deg" | "rad" | "arcsec";
+        };
+        Explanation: {
+            convention: components["schemas"]["ConventionFacets"];
+            /**
+             * @description The numbers are those of half or of twice the rotation, or only the vector part of the quaternion.
+             * @enum {string}
+             */
+            numbersAre?: "half-angle" | "double-angle" | "vector-part";
+            constantOffset?: components["schemas"]["ConstantOffset"][];
+            /** @description The numbers are those of the attitude so much earlier. */
+            timeLag?: {
+                seconds: number;
+            };
+            /** @description Every number is so many times what it should be. */
+            scale?: number;
+            /** @description What differs from the stated convention, one sentence each; empty where it is right as stated. */
+            edits: string[];
+            /** @description Of the angles that are left; √3 times the noise where the explanation is right. */
+            residual: {
+                rms: number;
+                max: number;
+                /** @enum {string} */
+                unit: "deg" | "rad";
+            };
+            /** @description Other ways to state the same: equal numbers for every attitude. May be cut. */
+            sameNumbersAs: components["schemas"]["EquivalentStatement"][];
         };
         HistoryEntry: {
             /** @description The request id, as in the X-Request-Id header of the answer. */
@@ -673,6 +759,57 @@ export interface components {
             warnings: number;
             warningCodes: string[];
         };
+        Identification: {
+            /**
+             * @description unique: one explanation, and no other fits the data within the noise. ambiguous: several do. none: nothing in the lattice does.
+             * @enum {string}
+             */
+            outcome: "unique" | "ambiguous" | "none";
+            /** @description Fewest edits first; at most 100. */
+            explanations: components["schemas"]["Explanation"][];
+            /** @description How many explanations remain in all. */
+            remaining: number;
+            /** @description What these data cannot tell. */
+            unobservable: string[];
+            discriminating: components["schemas"]["DiscriminatingAttitude"][];
+            /** @description The nearest explanation that was given up, and how many times the noise it is off. */
+            runnerUp: {
+                convention: components["schemas"]["ConventionFacets"];
+                /**
+                 * @description The numbers are those of half or of twice the rotation, or only the vector part of the quaternion.
+                 * @enum {string}
+                 */
+                numbersAre?: "half-angle" | "double-angle" | "vector-part";
+                edits: string[];
+                residual: {
+                    rms: number;
+                    /** @enum {string} */
+                    unit: "deg" | "rad";
+                };
+                timesNoise: number;
+            } | null;
+        };
+        IdentifyInput: {
+            reference: {
+                convention: components["schemas"]["Convention"];
+                /** @description One array of numbers per attitude, in the count and order that the convention states. A row-major matrix may also stand as three rows of three. */
+                attitudes: (number | number[])[][];
+            };
+            observed: {
+                /**
+                 * @description What the box is said to list. A claim: every reading of so many numbers is tried.
+                 * @enum {string}
+                 */
+                representation: "euler" | "quaternion" | "dcm" | "rotation-vector" | "axis-angle" | "mrp" | "gibbs";
+                /** @description One array of numbers per attitude, in the count and order that the convention states. A row-major matrix may also stand as three rows of three. */
+                numbers: (number | number[])[][];
+                /** @description The convention on the interface sheet; the edits say how the numbers differ from it. */
+                stated?: components["schemas"]["Convention"];
+            };
+            /** @description Seconds, increasing, one for each attitude; needed to find a time lag. */
+            times?: number[];
+            noise: components["schemas"]["Noise"];
+        };
         /** @description A published interface version. */
         InterfaceReference: {
             interface: string;
@@ -698,6 +835,12 @@ export interface components {
             /** @description Attitudes of one JSON call. */
             attitudesPerCall: number;
             parallelRequests: number;
+        };
+        Noise: {
+            /** @description Standard deviation of each component of the error rotation vector; 0 means exact. */
+            angle: number;
+            /** @enum {string} */
+            unit: "deg" | "rad";
         };
         OwnUsage: {
             month: string;
@@ -854,6 +997,8 @@ export interface components {
             }[];
             summary: string;
             engine: string;
+            /** @description Where one was asked for and the verdict is fail; at most the ten plainest explanations are kept. */
+            diagnosis?: components["schemas"]["Identification"];
         };
         SignInInput: {
             email: string;
@@ -896,6 +1041,10 @@ export interface components {
                 attitudes: (number | number[])[][];
             };
             tolerance: components["schemas"]["Tolerance"];
+            /** @description Where the verdict is fail, also say which mistakes would explain the actual attitudes. The noise is taken as a fifth of the tolerance. */
+            diagnose?: boolean;
+            /** @description Seconds, increasing, one for each attitude; with them a diagnosis can find a time lag. */
+            times?: number[];
             /** @description What was checked; runs can be found by it. */
             label?: string;
             /** @description The commit of the code that computed the actual attitudes. */
@@ -918,6 +1067,7 @@ export interface components {
             /** @description The worst error in a plain sentence. */
             summary: string;
             engine: string;
+            diagnosis?: components["schemas"]["Identification"];
         };
         Warning: {
             /** @enum {string} */
@@ -1341,6 +1491,198 @@ export interface operations {
                 };
                 content: {
                     "application/json": components["schemas"]["VerifyOutput"];
+                };
+            };
+            /** @description Bad Request. Codes: malformed-json, malformed-request, invalid-cursor. */
+            400: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Unauthorized. Codes: missing-key, invalid-key, revoked-key, expired-key, not-signed-in, wrong-credentials. */
+            401: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Forbidden. Codes: not-allowed, cross-site. */
+            403: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Payload Too Large. Codes: body-too-large, batch-too-large. */
+            413: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Unsupported Media Type. Codes: unsupported-media-type, unsupported-encoding. */
+            415: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Unprocessable Entity. Codes: unknown-preset, unknown-interface, missing-facet, unknown-facet, invalid-facet, missing-field, unknown-field, invalid-field, count-mismatch, not-a-number, not-finite, zero-norm, not-a-rotation, improper-axes, unrelated-frames, not-representable, invalid-convention. */
+            422: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Too Many Requests. Codes: too-many-requests, too-many-parallel, quota-exceeded. */
+            429: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Internal Server Error. Codes: internal, cross-check-failed. */
+            500: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Service Unavailable. Codes: not-recorded. */
+            503: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    identifyConvention: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                /**
+                 * @example {
+                 *       "reference": {
+                 *         "convention": {
+                 *           "preset": "aircraft-euler-deg"
+                 *         },
+                 *         "attitudes": [
+                 *           [
+                 *             30,
+                 *             10,
+                 *             20
+                 *           ],
+                 *           [
+                 *             120,
+                 *             -20,
+                 *             40
+                 *           ],
+                 *           [
+                 *             250,
+                 *             30,
+                 *             -25
+                 *           ],
+                 *           [
+                 *             340,
+                 *             5,
+                 *             60
+                 *           ]
+                 *         ]
+                 *       },
+                 *       "observed": {
+                 *         "representation": "quaternion",
+                 *         "numbers": [
+                 *           [
+                 *             0.1449,
+                 *             0.1277,
+                 *             0.2393,
+                 *             0.9515
+                 *           ],
+                 *           [
+                 *             0.3097,
+                 *             0.2101,
+                 *             0.8311,
+                 *             0.4113
+                 *           ],
+                 *           [
+                 *             0.0871,
+                 *             0.3162,
+                 *             -0.7404,
+                 *             0.5868
+                 *           ],
+                 *           [
+                 *             0.4985,
+                 *             -0.0495,
+                 *             -0.1717,
+                 *             0.8483
+                 *           ]
+                 *         ],
+                 *         "stated": {
+                 *           "preset": "aircraft-quaternion"
+                 *         }
+                 *       },
+                 *       "noise": {
+                 *         "angle": 0.01,
+                 *         "unit": "deg"
+                 *       }
+                 *     }
+                 */
+                "application/json": components["schemas"]["IdentifyInput"];
+            };
+        };
+        responses: {
+            /** @description OK */
+            200: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["Identification"];
                 };
             };
             /** @description Bad Request. Codes: malformed-json, malformed-request, invalid-cursor. */

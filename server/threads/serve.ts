@@ -1,0 +1,13 @@
+import { parentPort } from 'node:worker_threads';
+import { WorkerFailure } from './failure.ts';
+
+/** Answers the requests of a WorkerThread, one after another. */
+export function serveThread<Request, Result>(work: (request: Request) => Result): void {
+  parentPort!.on('message', ({ id, request }: { readonly id: number; readonly request: Request }) => {
+    try {
+      parentPort!.postMessage({ id, result: work(request) });
+    } catch (error) {
+      parentPort!.postMessage({ id, failure: WorkerFailure.of(error) });
+    }
+  });
+}
