@@ -1,0 +1,38 @@
+import type { Convention } from '../../convention.ts';
+import type { Rate, RateUnit } from '../../rates/rate.ts';
+
+/** Rates that are stated this way are these numbers, at every attitude. */
+export interface RateStatement {
+  readonly attitude: Convention;
+  readonly rate: Rate;
+}
+
+export interface RateExplanation extends RateStatement {
+  /** What to change in what was stated, one sentence each. */
+  readonly edits: readonly string[];
+  /** Of the differences of the angular velocities: root mean square and largest. */
+  readonly residual: { readonly rms: number; readonly max: number; readonly unit: RateUnit };
+  /** The next fewest edits; cut after a dozen. */
+  readonly sameNumbersAs: readonly RateStatement[];
+}
+
+/** A test that would tell remaining explanations apart: an attitude to hold while turning about one body axis. */
+export interface DiscriminatingRate {
+  /** In the reference's convention. */
+  readonly attitude: readonly number[];
+  readonly reading: string;
+  readonly separates: {
+    readonly answers: number;
+    readonly explanations: number;
+    readonly predictions: readonly { readonly numbers: readonly number[]; readonly explanations: readonly number[] }[];
+  };
+}
+
+export interface RateIdentification {
+  readonly outcome: 'unique' | 'ambiguous' | 'none';
+  /** Fewest edits first; at most 100. */
+  readonly explanations: readonly RateExplanation[];
+  readonly remaining: number;
+  readonly unobservable: readonly string[];
+  readonly discriminating: readonly DiscriminatingRate[];
+}
