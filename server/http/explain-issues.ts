@@ -71,8 +71,9 @@ function allowedBy(issue: Issue): string {
 
 const article = (type: string): string => (type === 'object' ? 'an object' : type === 'array' || type === 'tuple' ? 'an array' : type === 'int' ? 'a whole number' : type === 'number' ? 'a finite number' : type === 'boolean' ? 'true or false' : `a ${type}`);
 
-/** Which alternative of a convention reference somebody meant: the keys tell. */
+/** Which alternative of a convention reference, or of observed attitudes and rates, somebody meant: the keys tell. */
 function branchFor(value: unknown, alternatives: number): number | null {
+  if (alternatives === 2 && isObject(value)) return 'rates' in value ? 1 : 0;
   if (alternatives !== 3 || !isObject(value)) return null;
   if ('preset' in value) return 1;
   if ('interface' in value) return 2;
@@ -80,7 +81,7 @@ function branchFor(value: unknown, alternatives: number): number | null {
 }
 
 const isObject = (value: unknown): value is Record<string, unknown> => typeof value === 'object' && value !== null && !Array.isArray(value);
-const isConvention = (value: unknown): value is Record<string, unknown> => isObject(value) && typeof value['representation'] === 'string';
+const isConvention = (value: unknown): value is Record<string, unknown> => isObject(value) && typeof value['representation'] === 'string' && !('numbers' in value) && !('rates' in value);
 
 function valueAt(input: unknown, path: Path): unknown {
   let value = input;

@@ -1,8 +1,10 @@
 import { z } from 'zod';
 import { REPRESENTATIONS } from '../attitude/convention.ts';
+import { RATE_UNITS } from '../attitude/rates/rate.ts';
 import { conventionFacets, conventionReference } from './convention.ts';
 import { endpoint } from './endpoint.ts';
-import { attitudeRows } from './numbers.ts';
+import { attitudeRows, numberRows } from './numbers.ts';
+import { rateFacets, rateReference } from './rates.ts';
 
 const angleUnit = z.enum(['deg', 'rad']);
 const number = z.number({ error: 'must be a finite number' });
@@ -46,19 +48,43 @@ export const identification = z.strictObject({
     .meta({ description: 'The nearest explanation that was given up, and how many times the noise it is off.' }),
 }).meta({ id: 'Identification' });
 
-const times = z.array(number).meta({ description: 'Seconds, increasing, one for each attitude; needed to find a time lag.' });
+const rateUnit = z.enum(RATE_UNITS);
+const rateStatement = { attitude: conventionFacets, rate: rateFacets };
+
+const rateExplanation = z.strictObject({
+  ...rateStatement,
+  edits: z.array(z.string()).meta({ description: 'What differs from what was stated, one sentence each; empty where it is right.' }),
+  residual: z.strictObject({ rms: z.number(), max: z.number(), unit: rateUnit }).meta({ description: 'Of the differences of the angular velocities.' }),
+  sameNumbersAs: z.array(z.strictObject(rateStatement)),
+}).meta({ id: 'RateExplanation' });
+
+export const rateIdentification = z.strictObject({
+  outcome: z.enum(['unique', 'ambiguous', 'none']),
+  explanations: z.array(rateExplanation).max(100), remaining: z.int(), unobservable: z.array(z.string()), discriminating: z.array(discriminating).max(3),
+}).meta({ id: 'RateIdentification', description: 'As Identification, of rates: a convention of the attitude and a form of rate stand in place of the convention. A test to make is an attitude to hold and a body axis to turn about, which its reading names.' });
+
+const times = z.array(number).meta({ description: 'Seconds, increasing, one for each attitude; needed to find a time lag, and to identify rates at all.' });
 const noise = z.strictObject({
   angle: number.nonnegative({ error: 'must not be negative' }).meta({ description: 'Standard deviation of each component of the error rotation vector; 0 means exact.' }),
   unit: angleUnit,
+  rate: number.nonnegative({ error: 'must not be negative' }).optional().meta({ description: 'Of observed rates: standard deviation of each component of the angular velocity; the angle is then the noise of the reference.' }),
+  rateUnit: rateUnit.optional(),
 }).meta({ id: 'Noise' });
+
+const observedAttitudes = z.strictObject({
+  representation: z.enum(REPRESENTATIONS).meta({ description: 'What the box is said to list. A claim: every reading of so many numbers is tried.' }),
+  numbers: attitudeRows,
+  stated: conventionReference.optional().meta({ description: 'The convention on the interface sheet; the edits say how the numbers differ from it.' }),
+}).meta({ id: 'ObservedAttitudes' });
+
+const observedRates = z.strictObject({
+  rates: numberRows,
+  stated: z.strictObject({ attitude: conventionReference, rate: rateReference }).meta({ description: 'What the box is said to list, and the convention of the attitude that goes with it.' }),
+}).meta({ id: 'ObservedRates' });
 
 export const identifyInput = z.strictObject({
   reference: z.strictObject({ convention: conventionReference, attitudes: attitudeRows }),
-  observed: z.strictObject({
-    representation: z.enum(REPRESENTATIONS).meta({ description: 'What the box is said to list. A claim: every reading of so many numbers is tried.' }),
-    numbers: attitudeRows,
-    stated: conventionReference.optional().meta({ description: 'The convention on the interface sheet; the edits say how the numbers differ from it.' }),
-  }),
+  observed: z.union([observedAttitudes, observedRates], { error: 'must be observed attitudes, {"representation", "numbers", "stated"?}, or observed rates, {"rates", "stated"}' }),
   times: times.optional(),
   noise,
 }).meta({ id: 'IdentifyInput' });
@@ -66,9 +92,9 @@ export const identifyInput = z.strictObject({
 export const identifyEndpoint = endpoint({
   id: 'identifyConvention', method: 'post', path: '/identify', tag: 'Attitude',
   summary: 'Find every convention that a box’s numbers may follow',
-  description: 'Compares the numbers with trusted attitudes under every reading, axis set, order, sign and unit, and with constant offsets, a time lag and a scale. Says what explains them, what else would, what the data cannot tell, and which attitude to test next.',
+  description: 'Compares the numbers with trusted attitudes under every reading, axis set, order, sign and unit, and with constant offsets, a time lag and a scale. Says what explains them, what else would, what the data cannot tell, and which attitude to test next. Rates are compared with those of the reference attitudes, which takes their times.',
   auth: 'caller', permission: 'attitude.compute', recordsSessions: true,
-  body: identifyInput, status: 200, response: identification, problems: [400, 401, 403, 413, 415, 422, 429, 503],
+  body: identifyInput, status: 200, response: z.union([identification, rateIdentification]), problems: [400, 401, 403, 413, 415, 422, 429, 503],
   example: {
     reference: { convention: { preset: 'aircraft-euler-deg' }, attitudes: [[30, 10, 20], [120, -20, 40], [250, 30, -25], [340, 5, 60]] },
     observed: { representation: 'quaternion', numbers: [[0.1449, 0.1277, 0.2393, 0.9515], [0.3097, 0.2101, 0.8311, 0.4113], [0.0871, 0.3162, -0.7404, 0.5868], [0.4985, -0.0495, -0.1717, 0.8483]], stated: { preset: 'aircraft-quaternion' } },
@@ -77,4 +103,7 @@ export const identifyEndpoint = endpoint({
 });
 
 export type IdentifyInput = z.output<typeof identifyInput>;
+export type ObservedRates = z.output<typeof observedRates>;
+export type ObservedAttitudes = z.output<typeof observedAttitudes>;
+export type RateIdentificationDocument = z.output<typeof rateIdentification>;
 export type IdentificationDocument = z.output<typeof identification>;

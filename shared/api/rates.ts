@@ -16,7 +16,7 @@ export const rateReference = z.discriminatedUnion('rate', [
   z.strictObject({ rate: z.literal('dcm') }),
 ]).meta({ id: 'Rate', description: 'body, reference: angular velocity of the body axes relative to the reference axes, components in body or in reference axes. euler: derivatives of the angles, in their order and signs. quaternion, dcm: derivatives of the attitude’s own numbers.' });
 
-const rateFacets = z.strictObject({ rate: z.enum(['body', 'reference', 'euler', 'quaternion', 'dcm']), unit: unit.optional(), angles: conventionFacets.optional() });
+export const rateFacets = z.strictObject({ rate: z.enum(['body', 'reference', 'euler', 'quaternion', 'dcm']), unit: unit.optional(), angles: conventionFacets.optional() });
 
 export const ratesInput = z.strictObject({
   attitude: conventionReference,

@@ -74,6 +74,36 @@ describe('POST /identify', () => {
   });
 });
 
+describe('POST /identify with rates', () => {
+  const times = Array.from({ length: 200 }, (_, i) => i / 50);
+  const attitudes = times.map((t) => [40 * t, 25 * Math.sin(t), 35 * Math.sin(0.7 * t + 1)]);
+  /** ψ̇, θ̇, φ̇ of the same, °/s. */
+  const angleRates = times.map((t) => [40, 25 * Math.cos(t), 24.5 * Math.cos(0.7 * t + 1)]);
+  const stated = { attitude: EULER, rate: { rate: 'body', unit: 'deg/s' } };
+  const rates = (observed: object, more: object = {}) => post('/identify', { reference: { convention: EULER, attitudes }, observed, times, noise: { angle: 0, unit: 'deg', rate: 0.001, rateUnit: 'deg/s' }, ...more });
+
+  it('tells Euler rates from body rates', async () => {
+    const { status, body } = await rates({ rates: angleRates, stated });
+    expect(status).toBe(200);
+    expect([body.outcome, body.remaining]).toEqual(['unique', 1]);
+    expect(body.explanations[0]).toMatchObject({ attitude: { representation: 'euler' }, rate: { rate: 'euler', unit: 'deg/s', angles: { sequence: 'ZYX' } }, edits: ['reads rates of Euler angles, stated the angular velocity in body axes'], residual: { unit: 'deg/s' } });
+  });
+
+  it.each<[string, object, object, string, string]>([
+    ['rates without times', { rates: angleRates, stated }, { times: undefined }, 'missing-field', '/times'],
+    ['noise of rates without its unit', { rates: angleRates, stated }, { noise: { angle: 0, unit: 'deg', rate: 1 } }, 'missing-field', '/noise/rateUnit'],
+    ['rates without what was stated', { rates: angleRates }, {}, 'missing-field', '/observed/stated'],
+    ['rates that are short', { rates: angleRates.slice(1), stated }, {}, 'count-mismatch', '/observed/rates'],
+    ['an unknown field', { rates: angleRates, stated, representation: 'euler' }, {}, 'unknown-field', '/observed/representation'],
+    ['an unknown field beside numbers', { representation: 'euler', numbers: attitudes, claimed: 1 }, {}, 'unknown-field', '/observed/claimed'],
+    ['a rate that does not fit its attitude', { rates: angleRates, stated: { attitude: EULER, rate: { rate: 'dcm' } } }, {}, 'invalid-facet', '/observed/stated/rate/rate'],
+  ])('refuses %s', async (_what, observed, more, code, pointer) => {
+    const { status, body } = await rates(observed, more);
+    expect([status, body.code]).toEqual([422, code]);
+    expect(body.errors[0].pointer).toBe(pointer);
+  });
+});
+
 describe('POST /verify with diagnose', () => {
   const verification = (numbers: number[][], more: object = {}) => ({
     expected: { convention: EULER, attitudes: ATTITUDES }, actual: { convention: { preset: 'aircraft-dcm' }, attitudes: numbers }, tolerance: { angle: 0.1, unit: 'deg' }, diagnose: true, label: 'Hull unit', ...more,

@@ -77,7 +77,7 @@ export interface paths {
         put?: never;
         /**
          * Find every convention that a box’s numbers may follow
-         * @description Compares the numbers with trusted attitudes under every reading, axis set, order, sign and unit, and with constant offsets, a time lag and a scale. Says what explains them, what else would, what the data cannot tell, and which attitude to test next.
+         * @description Compares the numbers with trusted attitudes under every reading, axis set, order, sign and unit, and with constant offsets, a time lag and a scale. Says what explains them, what else would, what the data cannot tell, and which attitude to test next. Rates are compared with those of the reference attitudes, which takes their times.
          *
          *     Roles: administrator, integrator, engineer.
          */
@@ -795,18 +795,8 @@ export interface components {
                 /** @description One array of numbers per attitude, in the count and order that the convention states. A row-major matrix may also stand as three rows of three. */
                 attitudes: (number | number[])[][];
             };
-            observed: {
-                /**
-                 * @description What the box is said to list. A claim: every reading of so many numbers is tried.
-                 * @enum {string}
-                 */
-                representation: "euler" | "quaternion" | "dcm" | "rotation-vector" | "axis-angle" | "mrp" | "gibbs";
-                /** @description One array of numbers per attitude, in the count and order that the convention states. A row-major matrix may also stand as three rows of three. */
-                numbers: (number | number[])[][];
-                /** @description The convention on the interface sheet; the edits say how the numbers differ from it. */
-                stated?: components["schemas"]["Convention"];
-            };
-            /** @description Seconds, increasing, one for each attitude; needed to find a time lag. */
+            observed: components["schemas"]["ObservedAttitudes"] | components["schemas"]["ObservedRates"];
+            /** @description Seconds, increasing, one for each attitude; needed to find a time lag, and to identify rates at all. */
             times?: number[];
             noise: components["schemas"]["Noise"];
         };
@@ -841,6 +831,30 @@ export interface components {
             angle: number;
             /** @enum {string} */
             unit: "deg" | "rad";
+            /** @description Of observed rates: standard deviation of each component of the angular velocity; the angle is then the noise of the reference. */
+            rate?: number;
+            /** @enum {string} */
+            rateUnit?: "deg/s" | "rad/s";
+        };
+        ObservedAttitudes: {
+            /**
+             * @description What the box is said to list. A claim: every reading of so many numbers is tried.
+             * @enum {string}
+             */
+            representation: "euler" | "quaternion" | "dcm" | "rotation-vector" | "axis-angle" | "mrp" | "gibbs";
+            /** @description One array of numbers per attitude, in the count and order that the convention states. A row-major matrix may also stand as three rows of three. */
+            numbers: (number | number[])[][];
+            /** @description The convention on the interface sheet; the edits say how the numbers differ from it. */
+            stated?: components["schemas"]["Convention"];
+        };
+        ObservedRates: {
+            /** @description One row of numbers per attitude, in the order and count that the convention states. */
+            rates: number[][];
+            /** @description What the box is said to list, and the convention of the attitude that goes with it. */
+            stated: {
+                attitude: components["schemas"]["Convention"];
+                rate: components["schemas"]["Rate"];
+            };
         };
         OwnUsage: {
             month: string;
@@ -921,6 +935,44 @@ export interface components {
         } | {
             /** @constant */
             rate: "dcm";
+        };
+        RateExplanation: {
+            attitude: components["schemas"]["ConventionFacets"];
+            rate: {
+                /** @enum {string} */
+                rate: "body" | "reference" | "euler" | "quaternion" | "dcm";
+                /** @enum {string} */
+                unit?: "deg/s" | "rad/s";
+                angles?: components["schemas"]["ConventionFacets"];
+            };
+            /** @description What differs from what was stated, one sentence each; empty where it is right. */
+            edits: string[];
+            /** @description Of the differences of the angular velocities. */
+            residual: {
+                rms: number;
+                max: number;
+                /** @enum {string} */
+                unit: "deg/s" | "rad/s";
+            };
+            sameNumbersAs: {
+                attitude: components["schemas"]["ConventionFacets"];
+                rate: {
+                    /** @enum {string} */
+                    rate: "body" | "reference" | "euler" | "quaternion" | "dcm";
+                    /** @enum {string} */
+                    unit?: "deg/s" | "rad/s";
+                    angles?: components["schemas"]["ConventionFacets"];
+                };
+            }[];
+        };
+        /** @description As Identification, of rates: a convention of the attitude and a form of rate stand in place of the convention. A test to make is an attitude to hold and a body axis to turn about, which its reading names. */
+        RateIdentification: {
+            /** @enum {string} */
+            outcome: "unique" | "ambiguous" | "none";
+            explanations: components["schemas"]["RateExplanation"][];
+            remaining: number;
+            unobservable: string[];
+            discriminating: components["schemas"]["DiscriminatingAttitude"][];
         };
         RatesInput: {
             attitude: components["schemas"]["Convention"];
@@ -1682,7 +1734,7 @@ export interface operations {
                     [name: string]: unknown;
                 };
                 content: {
-                    "application/json": components["schemas"]["Identification"];
+                    "application/json": components["schemas"]["Identification"] | components["schemas"]["RateIdentification"];
                 };
             };
             /** @description Bad Request. Codes: malformed-json, malformed-request, invalid-cursor. */
