@@ -3,6 +3,7 @@ import { SequelizeStorage, Umzug } from 'umzug';
 import { firstTables } from './migrations/0001-first-tables.ts';
 import { runs } from './migrations/0003-runs.ts';
 import { limitsAndUsage } from './migrations/0002-limits-and-usage.ts';
+import { historyFilters } from './migrations/0004-history-filters.ts';
 
 /** One step of the schema, in raw SQL: Sequelize's own column changes rebuild a table and lose its cascade children. */
 export interface Migration {
@@ -10,7 +11,7 @@ export interface Migration {
   readonly statements: readonly string[];
 }
 
-const MIGRATIONS: readonly Migration[] = [firstTables, limitsAndUsage, runs];
+const MIGRATIONS: readonly Migration[] = [firstTables, limitsAndUsage, runs, historyFilters];
 
 /** Brings the schema up to date; returns the names of the steps it took. */
 export async function migrate(sequelize: Sequelize): Promise<string[]> {

@@ -12,6 +12,7 @@ import { explainIssues } from './explain-issues.ts';
 import { problemOf, sendProblem } from './problems.ts';
 import { readJson } from './read-body.ts';
 import { record } from './record.ts';
+import { isStream, sendStream } from './send-stream.ts';
 
 /** What a handler gets: everything parsed, the caller known. */
 export interface Input<E extends Endpoint> {
@@ -24,7 +25,7 @@ export interface Input<E extends Endpoint> {
 }
 
 type Output<S> = NonNullable<S> extends z.ZodType ? z.output<NonNullable<S>> : undefined;
-type Answer<E extends Endpoint> = E['status'] extends 204 ? undefined : Output<E['response']>;
+type Answer<E extends Endpoint> = E['status'] extends 204 ? undefined : Output<E['response']> | (Output<E['response']> extends string ? AsyncIterable<string> : never);
 
 /**
  * Mounts an endpoint of the contract. A request goes one way: caller → parsed input → handler → record → answer.
@@ -43,11 +44,12 @@ export function mount<E extends Endpoint>(services: Services, router: Router, en
         const input = await parseInput(endpoint, call);
         const answer = await handler(input as Input<E>);
         const { contentType } = endpoint;
-        const text = answer === undefined ? undefined : contentType === undefined ? JSON.stringify(answer) : String(answer);
+        const text = answer === undefined || isStream(answer) ? undefined : contentType === undefined ? JSON.stringify(answer) : String(answer);
         if (recorded(endpoint, call)) await record(services, call, route, endpoint.status, null);
         answered = true;
         response.status(endpoint.status);
-        if (text === undefined) response.end();
+        if (isStream(answer)) await sendStream(response.type(contentType!), answer, { logger: services.logger, requestId: call.id });
+        else if (text === undefined) response.end();
         else response.type(contentType ?? 'application/json').send(text);
       } catch (error) {
         await refuse(services, call, route, error);

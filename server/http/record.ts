@@ -11,6 +11,7 @@ export function record({ history }: Services, call: Call, route: string, status:
     keyId: caller?.keyId ?? null,
     personId: caller?.personId ?? null,
     ownerId: caller?.ownerId ?? null,
+    role: caller?.role ?? null,
     method: call.request.method,
     route,
     status,
@@ -19,6 +20,7 @@ export function record({ history }: Services, call: Call, route: string, status:
     attitudes: refused ? 0 : meter.attitudes,
     warnings: refused ? 0 : meter.warnings,
     warningCodes: refused ? '' : meter.warningCodes.join(','),
+    verdict: refused ? null : call.run?.verdict ?? null,
   };
   return history.append(row, refused || !call.run ? null : {
     ...call.run, detail: JSON.stringify(call.run.detail), at: row.at, requestId: row.requestId, keyId: row.keyId, personId: row.personId, ownerId: row.ownerId!,

@@ -2,7 +2,7 @@ import { convertEndpoint } from './attitude.ts';
 import { getConventionEndpoint, listConventionsEndpoint } from './conventions.ts';
 import type { Endpoint } from './endpoint.ts';
 import { healthEndpoint } from './health.ts';
-import { listHistoryEndpoint } from './history.ts';
+import { exportHistoryEndpoint, listHistoryEndpoint } from './history.ts';
 import { issueKeyEndpoint, listKeysEndpoint, revokeKeyEndpoint } from './keys.ts';
 import { identifyEndpoint } from './identify.ts';
 import { ratesEndpoint } from './rates.ts';
@@ -26,6 +26,7 @@ export const ENDPOINTS: readonly Endpoint[] = [
   revokeKeyEndpoint,
   changeKeyLimitsEndpoint,
   listHistoryEndpoint,
+  exportHistoryEndpoint,
   ownUsageEndpoint,
   usageByKeyEndpoint,
   listLimitsEndpoint,

@@ -1,3 +1,4 @@
+import type { Role } from '#shared/api/roles.ts';
 import { DataTypes, type Model, type ModelStatic, type Sequelize } from 'sequelize';
 
 /** One API call. Durations in microseconds; `warningCodes` joined by commas. */
@@ -10,6 +11,8 @@ export interface RequestRow {
   personId: string | null;
   /** Whose call it is: the owner of the key, or the person signed in. Null for calls that nobody could be told from. */
   ownerId: string | null;
+  /** Of the caller at the time of the call. */
+  role: Role | null;
   method: string;
   route: string;
   status: number;
@@ -18,6 +21,8 @@ export interface RequestRow {
   attitudes: number;
   warnings: number;
   warningCodes: string;
+  /** Of the run that the call made, if it made one. */
+  verdict: 'pass' | 'fail' | null;
 }
 
 export type RequestModel = ModelStatic<Model<RequestRow, Omit<RequestRow, 'id'>>>;
@@ -30,6 +35,7 @@ export function defineRequest(sequelize: Sequelize): RequestModel {
     keyId: { type: DataTypes.TEXT },
     personId: { type: DataTypes.TEXT },
     ownerId: { type: DataTypes.TEXT },
+    role: { type: DataTypes.TEXT },
     method: { type: DataTypes.TEXT, allowNull: false },
     route: { type: DataTypes.TEXT, allowNull: false },
     status: { type: DataTypes.INTEGER, allowNull: false },
@@ -38,5 +44,6 @@ export function defineRequest(sequelize: Sequelize): RequestModel {
     attitudes: { type: DataTypes.INTEGER, allowNull: false },
     warnings: { type: DataTypes.INTEGER, allowNull: false },
     warningCodes: { type: DataTypes.TEXT, allowNull: false },
+    verdict: { type: DataTypes.TEXT },
   }, { tableName: 'requests' });
 }

@@ -4,17 +4,17 @@ import type { RequestRow } from '../models/request.ts';
 export type NewRequest = Omit<RequestRow, 'id'>;
 
 const COLUMNS = [
-  'request_id', 'at', 'key_id', 'person_id', 'owner_id', 'method', 'route', 'status', 'code', 'duration_us', 'attitudes', 'warnings', 'warning_codes',
+  'request_id', 'at', 'key_id', 'person_id', 'owner_id', 'role', 'method', 'route', 'status', 'code', 'duration_us', 'attitudes', 'warnings', 'warning_codes', 'verdict',
 ] as const;
 
 /** Well within the 32,766 bound values that SQLite takes a statement, and short enough to read in an error. */
 const ROWS_PER_STATEMENT = 200;
 
 const valuesOf = (row: NewRequest): (string | number | null)[] => [
-  row.requestId, row.at, row.keyId, row.personId, row.ownerId, row.method, row.route, row.status, row.code, row.durationUs, row.attitudes, row.warnings, row.warningCodes,
+  row.requestId, row.at, row.keyId, row.personId, row.ownerId, row.role, row.method, row.route, row.status, row.code, row.durationUs, row.attitudes, row.warnings, row.warningCodes, row.verdict,
 ];
 
-/** Stores a group of history rows, the last use of their keys and the meter, in raw SQL: building a model per row costs more than the insert. */
+/** Stores a group of history rows with the codes of their warnings, the last use of their keys and the meter, in raw SQL: building a model per row costs more than the insert. */
 export async function storeRequests(sequelize: Sequelize, rows: readonly NewRequest[], transaction: Transaction): Promise<void> {
   for (let start = 0; start < rows.length; start += ROWS_PER_STATEMENT) {
     const part = rows.slice(start, start + ROWS_PER_STATEMENT);
@@ -22,6 +22,7 @@ export async function storeRequests(sequelize: Sequelize, rows: readonly NewRequ
     await sequelize.query(`INSERT INTO requests (${COLUMNS.join(', ')}) VALUES ${places}`, {
       bind: part.flatMap(valuesOf), transaction, type: QueryTypes.INSERT,
     });
+    await storeWarnings(sequelize, part.filter(({ warningCodes }) => warningCodes !== ''), transaction);
   }
   for (const [keyId, at] of lastUses(rows)) {
     await sequelize.query('UPDATE api_keys SET last_used_at = MAX(COALESCE(last_used_at, 0), $1) WHERE id = $2', { bind: [at, keyId], transaction, type: QueryTypes.UPDATE });
@@ -31,6 +32,15 @@ export async function storeRequests(sequelize: Sequelize, rows: readonly NewRequ
       ON CONFLICT (subject, day) DO UPDATE SET requests = requests + excluded.requests, attitudes = attitudes + excluded.attitudes`,
     { bind: [subject, day, requests, attitudes], transaction, type: QueryTypes.INSERT });
   }
+}
+
+/** One row for each code of each request, for finding requests by it. */
+async function storeWarnings(sequelize: Sequelize, warned: readonly NewRequest[], transaction: Transaction): Promise<void> {
+  if (warned.length === 0) return;
+  await sequelize.query(`
+    INSERT OR IGNORE INTO request_warnings (code, at, request)
+    SELECT codes.value, r.at, r.id FROM requests r, json_each('["' || replace(r.warning_codes, ',', '","') || '"]') AS codes
+    WHERE r.request_id IN (${warned.map((_, i) => `$${i + 1}`).join(', ')})`, { bind: warned.map(({ requestId }) => requestId), transaction, type: QueryTypes.INSERT });
 }
 
 function lastUses(rows: readonly NewRequest[]): Map<string, number> {

@@ -1,9 +1,11 @@
 import { PAGE_SIZE } from '#shared/api/limits.ts';
-import type { HistoryEntryDocument, HistoryQuery } from '#shared/api/history.ts';
-import type { HistoryRepository, HistoryRow } from '#server/db/repositories/history.ts';
+import type { HistoryEntryDocument, HistoryFilterQuery, HistoryQuery } from '#shared/api/history.ts';
+import type { HistoryRepository } from '#server/db/repositories/history.ts';
+import type { HistoryPosition, HistoryRow } from '#server/db/repositories/search-history.ts';
 import { scopeOf, type Caller } from '../caller.ts';
 import { toTimestamp } from '../clock.ts';
-import { DomainError } from '../errors.ts';
+import { csvRow } from './csv.ts';
+import { readCursor, readFilter, writeCursor } from './read-filter.ts';
 
 export interface HistoryContext {
   readonly history: HistoryRepository;
@@ -12,52 +14,57 @@ export interface HistoryContext {
 export interface HistoryPage {
   readonly items: HistoryEntryDocument[];
   readonly nextCursor: string | null;
+  readonly searchedBackTo: string | null;
   readonly routes: string[];
 }
+
+/** Rows fetched at a time by an export: enough to be quick, few enough to hold in memory many times over. */
+const EXPORTED_AT_A_TIME = 1_000;
 
 /** One page of the caller's history, newest first. */
 export async function listHistory({ history }: HistoryContext, caller: Caller, query: HistoryQuery): Promise<HistoryPage> {
   const ownerId = scopeOf(caller, 'history.read');
   const limit = query.limit === undefined ? PAGE_SIZE.default : Number(query.limit);
-  const [rows, routes] = await Promise.all([
-    history.page({
-      ownerId,
-      keyId: query.key,
-      route: query.route,
-      status: query.status === undefined ? undefined : statusRange(query.status),
-      from: query.from === undefined ? undefined : Date.parse(query.from),
-      to: query.to === undefined ? undefined : Date.parse(query.to),
-      before: query.cursor === undefined ? undefined : readCursor(query.cursor),
-      limit: limit + 1,
-    }),
-    history.routes(ownerId),
-  ]);
-  const items = rows.slice(0, limit);
-  const last = items.at(-1);
-  return { items: items.map(presentEntry), nextCursor: rows.length > limit && last ? String(last.id) : null, routes };
+  const before = query.cursor === undefined ? null : readCursor(query.cursor);
+  const [{ rows, next }, routes] = await Promise.all([history.page(readFilter(query, ownerId), before, limit), history.routes(ownerId)]);
+  return {
+    items: rows.map(presentEntry), routes,
+    nextCursor: next && writeCursor(next),
+    searchedBackTo: next && rows.length < limit ? toTimestamp(next.at) : null,
+  };
 }
 
-function statusRange(text: string): readonly [number, number] {
-  if (!text.endsWith('xx')) return [Number(text), Number(text)];
-  const hundreds = Number(text[0]) * 100;
-  return [hundreds, hundreds + 99];
+/** The whole of the caller's history that passes the filter as CSV, newest first, fetched as fast as it is taken. */
+export function exportHistory({ history }: HistoryContext, caller: Caller, query: HistoryFilterQuery): AsyncIterable<string> {
+  const filter = readFilter(query, scopeOf(caller, 'history.read'));
+  return (async function* () {
+    yield csvRow(['time', 'request id', 'key', 'key prefix', 'person', 'role', 'method', 'route', 'status', 'problem', 'verdict', 'duration in ms', 'attitudes', 'warnings', 'warning codes']);
+    let position: HistoryPosition | null = null;
+    do {
+      const { rows, next } = await history.page(filter, position, EXPORTED_AT_A_TIME);
+      yield rows.map(exportedRow).join('');
+      position = next;
+    } while (position);
+  })();
 }
 
-function readCursor(text: string): number {
-  if (!/^[0-9]{1,15}$/.test(text)) throw new DomainError('invalid-cursor', `"${text}" is not a cursor of this list.`, [{ pointer: '?cursor', message: 'must be a nextCursor of this list' }]);
-  return Number(text);
-}
+const exportedRow = (row: HistoryRow): string => csvRow([
+  toTimestamp(row.at), row.requestId, row.keyName, row.keyPrefix, row.personName, row.role, row.method, row.route, row.status, row.code, row.verdict,
+  row.durationUs / 1000, row.attitudes, row.warnings, row.warningCodes.replaceAll(',', ' '),
+]);
 
-function presentEntry(row: HistoryRow): HistoryEntryDocument {
+export function presentEntry(row: HistoryRow): HistoryEntryDocument {
   return {
     id: row.requestId,
     at: toTimestamp(row.at),
     key: row.keyId === null ? null : { id: row.keyId, name: row.keyName ?? '', prefix: row.keyPrefix ?? '' },
     person: row.personId === null ? null : { id: row.personId, name: row.personName ?? '' },
+    role: row.role,
     method: row.method,
     route: row.route,
     status: row.status,
     code: row.code,
+    verdict: row.verdict,
     durationMs: row.durationUs / 1000,
     attitudes: row.attitudes,
     warnings: row.warnings,

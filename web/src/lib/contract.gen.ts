@@ -263,9 +263,33 @@ export interface paths {
          * API calls, newest first
          * @description Every API call is one entry, refused ones included. A person whose role reaches only their own sees the calls of their keys and their own.
          *
+         *     A filter that few entries pass is searched in steps: a page may hold fewer entries than asked for, even none, and still have a `nextCursor`; the search then goes on from there.
+         *
          *     Roles: administrator, integrator, engineer (their own), reviewer.
          */
         get: operations["listHistory"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/history.csv": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /**
+         * API calls as CSV, newest first
+         * @description The whole history that passes the filter, as RFC 4180 with a header row. A text that a spreadsheet would take for a formula has an apostrophe in front.
+         *
+         *     Roles: administrator, integrator, engineer (their own), reviewer.
+         */
+        get: operations["exportHistory"];
         put?: never;
         post?: never;
         delete?: never;
@@ -748,11 +772,15 @@ export interface components {
                 id: string;
                 name: string;
             } | null;
+            /** @description Of the caller at the time of the call; null where nobody was known. */
+            role: components["schemas"]["Role"] | null;
             method: string;
             route: string;
             status: number;
             /** @description The problem code of a refused call. */
             code: string | null;
+            /** @description Of the run that the call made, if it made one. */
+            verdict: ("pass" | "fail") | null;
             durationMs: number;
             attitudes: number;
             /** @description Attitudes that a warning was given for. */
@@ -2750,9 +2778,16 @@ export interface operations {
                 limit?: string;
                 /** @description API key id. */
                 key?: string;
+                /** @description Role of the caller at the time of the call. */
+                role?: components["schemas"]["Role"];
                 /** @description As in the entries, such as /api/v1/convert. */
                 route?: string;
                 status?: string;
+                verdict?: "pass" | "fail";
+                /** @description Calls with a warning of this code. */
+                warning?: "near-gimbal-lock" | "severe-gimbal-lock" | "gimbal-lock" | "renormalised" | "reorthonormalised";
+                /** @description A request id, or how it begins. */
+                id?: string;
                 /** @description Not before this time. */
                 from?: string;
                 /** @description Before this time. */
@@ -2776,6 +2811,8 @@ export interface operations {
                         items: components["schemas"]["HistoryEntry"][];
                         /** @description Give it as `cursor` for the next page; null on the last. */
                         nextCursor: string | null;
+                        /** @description Where a page is shorter than asked for and not the last: how far back it has looked. */
+                        searchedBackTo: string | null;
                         /** @description Routes that the caller’s history holds, for filtering. */
                         routes: string[];
                     };
@@ -2790,6 +2827,111 @@ export interface operations {
                 };
                 content: {
                     "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Unauthorized. Codes: missing-key, invalid-key, revoked-key, expired-key, not-signed-in, wrong-credentials. */
+            401: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Forbidden. Codes: not-allowed, cross-site. */
+            403: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Unprocessable Entity. Codes: unknown-preset, unknown-interface, missing-facet, unknown-facet, invalid-facet, missing-field, unknown-field, invalid-field, count-mismatch, not-a-number, not-finite, zero-norm, not-a-rotation, improper-axes, unrelated-frames, not-representable, invalid-convention. */
+            422: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Too Many Requests. Codes: too-many-requests, too-many-parallel, quota-exceeded. */
+            429: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Internal Server Error. Codes: internal, cross-check-failed. */
+            500: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Service Unavailable. Codes: not-recorded. */
+            503: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    exportHistory: {
+        parameters: {
+            query?: {
+                /** @description API key id. */
+                key?: string;
+                /** @description Role of the caller at the time of the call. */
+                role?: components["schemas"]["Role"];
+                /** @description As in the entries, such as /api/v1/convert. */
+                route?: string;
+                status?: string;
+                verdict?: "pass" | "fail";
+                /** @description Calls with a warning of this code. */
+                warning?: "near-gimbal-lock" | "severe-gimbal-lock" | "gimbal-lock" | "renormalised" | "reorthonormalised";
+                /** @description A request id, or how it begins. */
+                id?: string;
+                /** @description Not before this time. */
+                from?: string;
+                /** @description Before this time. */
+                to?: string;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            /** @description OK */
+            200: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "text/csv": string;
                 };
             };
             /** @description Unauthorized. Codes: missing-key, invalid-key, revoked-key, expired-key, not-signed-in, wrong-credentials. */

@@ -4,7 +4,7 @@ import { Link } from 'react-router-dom';
 import { Notice, ProblemNotice } from '../../components/notice.tsx';
 import { PageHeading } from '../../components/page-heading.tsx';
 import { Skeleton } from '../../components/skeleton.tsx';
-import { historyQuery, type HistoryEntry } from '../../features/history/api/history.ts';
+import { historyQuery, NO_FILTER, type HistoryEntry } from '../../features/history/api/history.ts';
 import { HistoryTable } from '../../features/history/components/history-table.tsx';
 import { RecordDialog } from '../../features/history/components/record-dialog.tsx';
 import { keysQuery } from '../../features/keys/api/keys.ts';
@@ -17,7 +17,6 @@ import { count, date } from '../../lib/format.ts';
 const SOON = 14 * 86_400_000;
 /** From this share of its monthly quota on, a key is worth a word. */
 const NEARLY_SPENT = 0.8;
-const NO_FILTER = { key: '', route: '', from: '', to: '', cursor: '' };
 
 export function Component() {
   const { data: person } = useQuery(sessionQuery);

@@ -1,7 +1,7 @@
 import { useSearchParams } from 'react-router-dom';
-import type { HistoryFilter } from './history.ts';
+import { NO_FILTER, type HistoryFilter } from './history.ts';
 
-const NAMES = ['key', 'route', 'status', 'from', 'to', 'cursor'] as const;
+const NAMES = Object.keys(NO_FILTER) as (keyof HistoryFilter)[];
 
 /** The filter lives in the address, so that a view can be linked to; changing it starts again at the newest entry. */
 export function useHistoryFilter(): readonly [HistoryFilter, (change: Partial<HistoryFilter>) => void] {
