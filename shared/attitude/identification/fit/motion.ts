@@ -55,12 +55,14 @@ export class ReferenceRecording {
     return this.times ? Math.min(2, (this.times[this.count - 1]! - this.times[0]!) / 2) : 0;
   }
 
-  at(lag: number): Motion {
+  /** @param stride - takes every so-manieth sample only. */
+  at(lag: number, stride = 1): Motion {
     const usable: number[] = [];
-    const matrices = new Float64Array(9 * this.count);
-    const derivatives = this.times ? new Float64Array(9 * this.count) : null;
+    const most = 9 * Math.ceil(this.count / stride);
+    const matrices = new Float64Array(most);
+    const derivatives = this.times ? new Float64Array(most) : null;
     let weight = 0;
-    for (let i = 0; i < this.count; i++) {
+    for (let i = 0; i < this.count; i += stride) {
       const to = 9 * usable.length;
       if (derivatives) {
         const fraction = this.#sample(this.times![i]! - lag, lag === 0, matrices, derivatives, to);
@@ -93,12 +95,12 @@ export class ReferenceRecording {
     if (gap && !onSample) return -1;
     const { value, derivative } = this.#weights;
     this.#weigh(nodes, t);
+    const all = this.matrices;
     for (let k = 0; k < 9; k++) {
       let v = 0, d = 0;
-      for (let n = 0; n < nodes; n++) {
-        const c = this.matrices[9 * (from + n) + k]!;
-        v += value[n]! * c;
-        d += derivative[n]! * c;
+      for (let n = 0, c = 9 * from + k; n < nodes; n++, c += 9) {
+        v += value[n]! * all[c]!;
+        d += derivative[n]! * all[c]!;
       }
       matrices[at + k] = v;
       // In a gap the rate is unknown; the sample then says nothing of a lag.
@@ -205,8 +207,9 @@ export function thinned({ lag, samples, matrices, derivatives, interpolationVari
 
 /** ω = vee(C Ċᵀ), by its antisymmetric part: [ω×] = C Ċᵀ. */
 export function bodyRate(c: ArrayLike<number>, derivatives: Float64Array, at: number, omega: Float64Array): void {
-  const entry = (i: number, j: number): number => c[3 * i]! * derivatives[at + 3 * j]! + c[3 * i + 1]! * derivatives[at + 3 * j + 1]! + c[3 * i + 2]! * derivatives[at + 3 * j + 2]!;
-  omega[0] = (entry(2, 1) - entry(1, 2)) / 2;
-  omega[1] = (entry(0, 2) - entry(2, 0)) / 2;
-  omega[2] = (entry(1, 0) - entry(0, 1)) / 2;
+  omega[0] = (product(c, 6, derivatives, at + 3) - product(c, 3, derivatives, at + 6)) / 2;
+  omega[1] = (product(c, 0, derivatives, at + 6) - product(c, 6, derivatives, at)) / 2;
+  omega[2] = (product(c, 3, derivatives, at) - product(c, 0, derivatives, at + 3)) / 2;
 }
+
+const product = (c: ArrayLike<number>, i: number, d: Float64Array, j: number): number => c[i]! * d[j]! + c[i + 1]! * d[j + 1]! + c[i + 2]! * d[j + 2]!;

@@ -9,7 +9,7 @@ import { TURN_COUNT } from '../lattice/turns.ts';
 import { keyOf, type Fit, type Place } from './fit.ts';
 import { DecoderFitting, type Wanted } from './fit-decoder.ts';
 import { largestErrors } from './largest-error.ts';
-import { chordMismatch, chordSlack, numbersAt, variedSamples, type VariedSamples } from './samples.ts';
+import { chordMismatch, chordSlack, numbersAt, POOL, variedSamples, type VariedSamples } from './samples.ts';
 import { shareOffset } from './shared-offsets.ts';
 
 /** The numbers of one recording and the decoders that may have made them. */
@@ -41,6 +41,10 @@ const FOLLOWED = 3;
 /** So many samples are enough to tell a scale. */
 const FEWER = 4096;
 
+/** Which samples sums are over: all; an even selection of those at hand; or one taken before anything else, of as many or for a glance. */
+type Which = 'all' | 'few' | 'coarse' | 'glance';
+const AT_MOST = { all: Infinity, few: Infinity, coarse: FEWER, glance: POOL } as const;
+
 /** The samples that one lag leaves, with what is made of them. */
 interface Samples {
   readonly motion: Motion;
@@ -54,7 +58,7 @@ interface Samples {
 /** Works on one decoder at a time, keeping what several of them share. */
 export class DecoderSearch {
   readonly problem: Problem;
-  readonly #samples = new Map<number, Samples>();
+  readonly #samples = new Map<string, Samples>();
   readonly #turns = new Map<string, number>();
   readonly #moments = new Map<string, Moments | null>();
   readonly #readerIds = new Map<Reader, number>();
@@ -70,7 +74,7 @@ export class DecoderSearch {
 
   /** Whether chords between samples, which no axis sets and no offsets change, agree with the reference at this place. */
   alive(decoder: Decoder, place: Place): boolean {
-    const { varied, numbers, criteria } = this.#at(place.lag);
+    const { varied, numbers, criteria } = this.#at(place.lag, place.lag === 0 ? 'all' : 'glance');
     const m = this.#readVaried(decoder.reader, numbers, varied, 1 / place.scale);
     return m !== null && chordMismatch(m, varied.pairs, varied.chords).largest <= chordSlack(Math.sqrt(criteria.variance));
   }
@@ -91,19 +95,19 @@ export class DecoderSearch {
   }
 
   /** A decoder with its sums at one place; null where it cannot be. */
-  fitting(decoder: Decoder, index: number, place: Place): DecoderFitting | null {
-    const { motion, numbers, varied, criteria, fewer } = this.#at(place.lag);
+  fitting(decoder: Decoder, index: number, place: Place, which: 'all' | 'coarse' = 'all'): DecoderFitting | null {
+    const { motion, numbers, varied, criteria, fewer } = this.#at(place.lag, which);
     if (motion.samples.length === 0) return null;
-    const moments = this.#momentsAt(decoder, place, false);
+    const moments = this.#momentsAt(decoder, place, which);
     if (!moments) return null;
     const { scalable } = decoder.reader;
     const withScale = scalable && (fewer === null || place.freed.includes('scale'));
     return new DecoderFitting({
       decoder, index, place,
-      sums: { motion, moments, scaled: withScale ? this.#scaledAt(decoder, place, false) : null },
+      sums: { motion, moments, scaled: withScale ? this.#scaledAt(decoder, place, which) : null },
       scaleSums: () => {
-        const scaled = scalable && fewer ? this.#scaledAt(decoder, place, true) : null;
-        return scaled && { motion: fewer!.motion, moments: this.#momentsAt(decoder, place, true)!, scaled };
+        const scaled = scalable && fewer ? this.#scaledAt(decoder, place, 'few') : null;
+        return scaled && { motion: fewer!.motion, moments: this.#momentsAt(decoder, place, 'few')!, scaled };
       },
       startForBody: () => startForBody(this.#readVaried(decoder.reader, numbers, varied, 1 / place.scale)!, varied.matrices, varied.pairs, decoder.transposed),
     }, criteria);
@@ -140,7 +144,7 @@ export class DecoderSearch {
   /** The same fit with its offset shared between both sides in the fewest words, where the data do not say which side it is on. */
   shared(fit: Fit, costOf: (fit: Fit) => number): Fit {
     const { motion, criteria } = this.#at(fit.place.lag);
-    return shareOffset(fit, this.#momentsAt(fit.decoder, fit.place, false)!, motion, criteria.variance, costOf);
+    return shareOffset(fit, this.#momentsAt(fit.decoder, fit.place, 'all')!, motion, criteria.variance, costOf);
   }
 
   #idOf(reader: Reader): number {
@@ -149,21 +153,28 @@ export class DecoderSearch {
     return id;
   }
 
+  /** Newton's steps on an even selection where there are many samples, then once more on all. */
   #settle(decoder: Decoder, index: number, start: Place, wanted: Wanted): Fit[] {
+    const many = this.problem.recording.count > FEWER;
     let place = this.#snapped(start);
-    let fits: Fit[] = [];
+    let fits: readonly Fit[] = [];
     for (let step = 0; step < NEWTON_STEPS; step++) {
-      if (!this.#sensible(place)) return [];
-      const fitting = this.fitting(decoder, index, place);
-      if (!fitting) return [];
-      fitting.fitAxisSets(wanted);
-      fitting.fitOffsets(wanted);
-      fits = fitting.fits;
-      const next = fitting.proposals.map((proposal) => proposal.place).find(({ freed }) => freed.join() === place.freed.join());
-      if (!next || this.#same(next, place)) break;
-      place = this.#snapped(next);
+      const next = this.#stepped(decoder, index, place, wanted, many ? 'coarse' : 'all');
+      if (!next) return [];
+      fits = next.fits;
+      if (!next.place || this.#same(next.place, place)) break;
+      place = this.#snapped(next.place);
     }
-    return fits;
+    return many && fits.length > 0 ? [...(this.#stepped(decoder, index, place, wanted, 'all')?.fits ?? [])] : [...fits];
+  }
+
+  /** Fits at one place, and where to go on; null outside all sense. */
+  #stepped(decoder: Decoder, index: number, place: Place, wanted: Wanted, which: 'all' | 'coarse'): { readonly fits: readonly Fit[]; readonly place: Place | undefined } | null {
+    const fitting = this.#sensible(place) ? this.fitting(decoder, index, place, which) : null;
+    if (!fitting) return null;
+    fitting.fitAxisSets(wanted);
+    fitting.fitOffsets(wanted);
+    return { fits: fitting.fits, place: fitting.proposals.map((proposal) => proposal.place).find(({ freed }) => freed.join() === place.freed.join()) };
   }
 
   /**
@@ -200,11 +211,13 @@ export class DecoderSearch {
     return kept;
   }
 
-  #at(lag: number): Samples {
-    let at = this.#samples.get(lag);
+  #at(lag: number, which: Which = 'all'): Samples {
+    const stride = Math.max(1, Math.ceil(this.problem.recording.count / AT_MOST[which]));
+    const key = `${lag}/${stride}`;
+    let at = this.#samples.get(key);
     if (!at) {
       const { recording, numbers, width, sigma, criteria } = this.problem;
-      const motion = recording.at(lag);
+      const motion = recording.at(lag, stride);
       const used = motion.samples.length === recording.count ? numbers : numbersAt(numbers, width, motion.samples);
       at = {
         motion, numbers: used,
@@ -212,7 +225,7 @@ export class DecoderSearch {
         varied: variedSamples(motion),
         criteria: motion.interpolationVariance === 0 ? criteria : new Criteria(sigma, motion.interpolationVariance),
       };
-      this.#samples.set(lag, at);
+      this.#samples.set(key, at);
     }
     return at;
   }
@@ -223,32 +236,36 @@ export class DecoderSearch {
     return { motion: thinned(motion, places), numbers: numbersAt(numbers, this.problem.width, places) };
   }
 
-  #scaledAt(decoder: Decoder, place: Place, few: boolean): ScaledMoments | null {
-    const { motion, numbers, fewer } = this.#at(place.lag);
-    const up = this.#momentsAt(decoder, { ...place, scale: place.scale * Math.exp(SCALE_STEP) }, few);
-    const down = this.#momentsAt(decoder, { ...place, scale: place.scale * Math.exp(-SCALE_STEP) }, few);
+  #scaledAt(decoder: Decoder, place: Place, which: Which): ScaledMoments | null {
+    const { motion, numbers } = this.#chosen(place.lag, which);
+    const up = this.#momentsAt(decoder, { ...place, scale: place.scale * Math.exp(SCALE_STEP) }, which);
+    const down = this.#momentsAt(decoder, { ...place, scale: place.scale * Math.exp(-SCALE_STEP) }, which);
     if (!up || !down) return null;
-    const key = `${this.#idOf(decoder.reader)}/${place.lag}/${place.scale}/${few}`;
+    const key = `${this.#idOf(decoder.reader)}/${place.lag}/${place.scale}/${which}`;
     let turn = this.#turns.get(key);
-    if (turn === undefined) this.#turns.set(key, turn = squaredTurn(decoder.reader, few ? fewer!.numbers : numbers, 1 / place.scale, (few ? fewer!.motion : motion).samples.length, SCALE_STEP));
+    if (turn === undefined) this.#turns.set(key, turn = squaredTurn(decoder.reader, numbers, 1 / place.scale, motion.samples.length, SCALE_STEP));
     return { step: SCALE_STEP, up, down, squaredTurn: turn };
   }
 
-  #momentsAt({ reader, transposed }: Decoder, { lag, scale }: Place, few: boolean): Moments | null {
-    const plain = this.#shared(reader, lag, scale, few, false);
-    return transposed && plain ? this.#shared(reader, lag, scale, few, true) : plain;
+  #momentsAt({ reader, transposed }: Decoder, { lag, scale }: Place, which: Which): Moments | null {
+    const plain = this.#shared(reader, lag, scale, which, false);
+    return transposed && plain ? this.#shared(reader, lag, scale, which, true) : plain;
   }
 
-  #shared(reader: Reader, lag: number, scale: number, few: boolean, transposed: boolean): Moments | null {
-    const key = `${this.#idOf(reader)}/${lag}/${scale}/${few}/${transposed}`;
+  #shared(reader: Reader, lag: number, scale: number, which: Which, transposed: boolean): Moments | null {
+    const key = `${this.#idOf(reader)}/${lag}/${scale}/${which}/${transposed}`;
     let moments = this.#moments.get(key);
     if (moments === undefined) {
-      const at = this.#at(lag);
-      const { motion, numbers } = few ? at.fewer! : at;
-      moments = transposed ? transposedMoments(this.#shared(reader, lag, scale, few, false)!) : momentsOf(reader, numbers, 1 / scale, motion);
+      const { motion, numbers } = this.#chosen(lag, which);
+      moments = transposed ? transposedMoments(this.#shared(reader, lag, scale, which, false)!) : momentsOf(reader, numbers, 1 / scale, motion);
       this.#moments.set(key, moments);
     }
     return moments;
+  }
+
+  #chosen(lag: number, which: Which): { readonly motion: Motion; readonly numbers: Float64Array } {
+    const at = this.#at(lag, which);
+    return which === 'few' ? at.fewer! : at;
   }
 
   #readVaried(reader: Reader, numbers: Float64Array, varied: VariedSamples, factor: number): Float64Array | null {

@@ -31,7 +31,7 @@ export class LagSearch {
     const inner = [...times.keys()].filter((i) => times[i]! - longest >= times[0]! && times[i]! + longest <= times[times.length - 1]!);
     const matrices = new Float64Array(9 * inner.length);
     inner.forEach((i, k) => matrices.set(recording.matrices.subarray(9 * i, 9 * i + 9), 9 * k));
-    const varied = inner.length >= 2 ? variedSamples({ ...recording.at(0), matrices }) : null;
+    const varied = inner.length >= 2 ? variedSamples({ matrices }) : null;
     this.#places = varied ? varied.places.map((place) => inner[place]!) : new Int32Array(0);
     this.#pairs = varied ? varied.pairs : new Int32Array(0);
     this.#grid = Array.from({ length: GRID + 1 }, (_, k) => ((2 * k) / GRID - 1) * longest);

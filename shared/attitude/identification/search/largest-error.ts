@@ -1,4 +1,3 @@
-import { multiply } from '../fit/small-matrix.ts';
 import type { Motion } from '../fit/motion.ts';
 import { TURNS } from '../lattice/turns.ts';
 import type { Fit } from './fit.ts';
@@ -48,12 +47,26 @@ function squaredErrorOf({ decoder, bodyTurn, referenceTurn, b, a, lag, place: he
       return sum;
     };
   }
-  const shifted = new Float64Array(9);
+  const [b0, b1, b2, b3, b4, b5, b6, b7, b8] = b as unknown as Nine;
+  const [f0, f1, f2, f3, f4, f5, f6, f7, f8] = from as unknown as Nine;
+  // Written out, and without a matrix made for each sample: this runs for every sample of every explanation.
   return (m, at, c, cAt) => {
-    for (let k = 0; k < 9; k++) shifted[k] = c[cAt + k]! - (shift === 0 ? 0 : shift * derivatives![cAt + k]!);
-    const expected = multiply(multiply(b, shifted), a);
-    let sum = 0;
-    for (let k = 0; k < 9; k++) sum += (m[at + from[k]!]! - expected[k]!) ** 2;
-    return sum;
+    const d = derivatives ?? c;
+    const c0 = c[cAt]! - shift * d[cAt]!, c1 = c[cAt + 1]! - shift * d[cAt + 1]!, c2 = c[cAt + 2]! - shift * d[cAt + 2]!;
+    const c3 = c[cAt + 3]! - shift * d[cAt + 3]!, c4 = c[cAt + 4]! - shift * d[cAt + 4]!, c5 = c[cAt + 5]! - shift * d[cAt + 5]!;
+    const c6 = c[cAt + 6]! - shift * d[cAt + 6]!, c7 = c[cAt + 7]! - shift * d[cAt + 7]!, c8 = c[cAt + 8]! - shift * d[cAt + 8]!;
+    return row(b0 * c0 + b1 * c3 + b2 * c6, b0 * c1 + b1 * c4 + b2 * c7, b0 * c2 + b1 * c5 + b2 * c8, a, m[at + f0]!, m[at + f1]!, m[at + f2]!)
+      + row(b3 * c0 + b4 * c3 + b5 * c6, b3 * c1 + b4 * c4 + b5 * c7, b3 * c2 + b4 * c5 + b5 * c8, a, m[at + f3]!, m[at + f4]!, m[at + f5]!)
+      + row(b6 * c0 + b7 * c3 + b8 * c6, b6 * c1 + b7 * c4 + b8 * c7, b6 * c2 + b7 * c5 + b8 * c8, a, m[at + f6]!, m[at + f7]!, m[at + f8]!);
   };
+}
+
+type Nine = readonly [number, number, number, number, number, number, number, number, number];
+
+/** |(x, y, z) A − (p, q, r)|². */
+function row(x: number, y: number, z: number, a: Float64Array, p: number, q: number, r: number): number {
+  const d = x * a[0]! + y * a[3]! + z * a[6]! - p;
+  const e = x * a[1]! + y * a[4]! + z * a[7]! - q;
+  const f = x * a[2]! + y * a[5]! + z * a[8]! - r;
+  return d * d + e * e + f * f;
 }

@@ -11,11 +11,12 @@ export interface VariedSamples {
   readonly chords: Float64Array;
 }
 
-const POOL = 400;
+/** Varied samples are chosen out of so many. */
+export const POOL = 400;
 const MOST = 48;
 
 /** Farthest first: each next sample is the one farthest from all before it, out of an even selection. */
-export function variedSamples({ matrices }: Motion): VariedSamples {
+export function variedSamples({ matrices }: Pick<Motion, 'matrices'>): VariedSamples {
   const count = matrices.length / 9;
   const pool = Math.min(POOL, count);
   const placeOf = (k: number): number => (pool === 1 ? 0 : Math.round((k * (count - 1)) / (pool - 1)));
