@@ -9,7 +9,7 @@ beforeAll(async () => {
 });
 afterAll(() => browser.close());
 
-const PAGES = ['/', '/workbench', '/workbench?from=aircraft-quaternion&to=aircraft-dcm&n=1&n=0&n=0&n=0', '/verify', '/runs', '/conventions', '/conventions/aircraft-dcm', '/keys', '/history', '/usage', '/first-call', '/problems/missing-facet', '/nowhere'];
+const PAGES = ['/', '/workbench', '/workbench?from=aircraft-quaternion&to=aircraft-dcm&n=1&n=0&n=0&n=0', '/verify', '/identify', '/runs', '/conventions', '/conventions/aircraft-dcm', '/keys', '/history', '/usage', '/first-call', '/problems/missing-facet', '/nowhere'];
 
 describe.each(['light', 'dark'] as const)('in the %s theme', (colorScheme) => {
   it.each([360, 768, 1440])('every page at %i pixels is accessible, quiet, and never scrolls sideways', async (width) => {

@@ -19,6 +19,7 @@ export const router = createBrowserRouter([
           { path: 'conventions', lazy: () => import('./routes/conventions.tsx') },
           { path: 'conventions/:id', lazy: () => import('./routes/convention.tsx') },
           { path: 'verify', lazy: () => import('./routes/verify.tsx') },
+          { path: 'identify', lazy: () => import('./routes/identify.tsx') },
           { path: 'runs', lazy: () => import('./routes/runs.tsx') },
           { path: 'runs/:id', lazy: () => import('./routes/run.tsx') },
           { path: 'keys', lazy: () => import('./routes/keys.tsx') },

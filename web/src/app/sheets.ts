@@ -22,6 +22,7 @@ export const SHEET_GROUPS: readonly SheetGroup[] = [
   { title: 'Work', sheets: [
     { number: '101', path: '/workbench', title: 'Workbench', roles: COMPUTE },
     { number: '102', path: '/verify', title: 'Verify', roles: COMPUTE },
+    { number: '103', path: '/identify', title: 'Identify', roles: COMPUTE },
   ] },
   { title: 'Records', sheets: [
     { number: '201', path: '/runs', title: 'Runs' },

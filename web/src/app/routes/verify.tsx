@@ -1,5 +1,5 @@
 import { useMemo, useState } from 'react';
-import { useNavigate } from 'react-router-dom';
+import { useLocation, useNavigate } from 'react-router-dom';
 import { Button } from '../../components/button.tsx';
 import { SelectField, TextField } from '../../components/field.tsx';
 import { Notice, ProblemNotice } from '../../components/notice.tsx';
@@ -14,8 +14,11 @@ import { statementOf } from '../../features/workbench/model/workbench-state.ts';
 export function Component() {
   const navigate = useNavigate();
   const verify = useVerify();
-  const [expected, setExpected] = useState(() => emptyRecording(statementOf('aircraft-euler-deg')));
-  const [actual, setActual] = useState(() => emptyRecording(statementOf('aircraft-quaternion')));
+  // What the identify page hands over.
+  const given = useLocation().state as { readonly expected?: Recording; readonly actual?: Recording } | null;
+  const [expected, setExpected] = useState(() => given?.expected ?? emptyRecording(statementOf('aircraft-euler-deg')));
+  const [actual, setActual] = useState(() => given?.actual ?? emptyRecording(statementOf('aircraft-quaternion')));
+  const [diagnose, setDiagnose] = useState(true);
   const [tolerance, setTolerance] = useState({ angle: '0.1', unit: 'deg' as Tolerance['unit'] });
   const [label, setLabel] = useState('');
   const left = useRead(expected);
@@ -34,7 +37,7 @@ export function Component() {
         if (obstacle) return;
         verify.mutate({
           expected: { convention: expected.statement.convention, attitudes: left.attitudes }, actual: { convention: actual.statement.convention, attitudes: right.attitudes },
-          tolerance: { angle: within, unit: tolerance.unit }, ...(label.trim() && { label: label.trim() }),
+          tolerance: { angle: within, unit: tolerance.unit }, ...(label.trim() && { label: label.trim() }), diagnose,
         }, { onSuccess: ({ run }) => navigate(`/runs/${run}`) });
       }}>
         <div className="grid gap-6 lg:grid-cols-2">
@@ -51,6 +54,8 @@ export function Component() {
           <TextField label="Label" placeholder="what is checked" maxLength={120} value={label} onChange={(event) => setLabel(event.target.value)} />
           <Button kind="main" type="submit" disabled={obstacle !== null} busy={verify.isPending}>Verify</Button>
         </div>
+        <label className="flex items-start gap-2"><input type="checkbox" className="mt-1" checked={diagnose} onChange={(event) => setDiagnose(event.target.checked)} />
+          <span>If it fails, say which mistake of convention would explain it.</span></label>
         {obstacle && <Notice kind="note" title={obstacle} />}
         {verify.error && <ProblemNotice error={verify.error} />}
       </form>

@@ -1,10 +1,11 @@
 import { keepPreviousData, queryOptions, useMutation } from '@tanstack/react-query';
 import type { Convention } from '../../../../../shared/attitude/convention.ts';
+import type { Identification } from '../../../../../shared/attitude/identification/identification.ts';
 import { client, dataOf } from '../../../lib/api-client.ts';
 import type { components } from '../../../lib/contract.gen.ts';
 
 /** The client loosens tuples to arrays; the contract has them. */
-export type Run = Omit<components['schemas']['Run'], 'expected' | 'actual'> & { expected: Convention; actual: Convention };
+export type Run = Omit<components['schemas']['Run'], 'expected' | 'actual' | 'diagnosis'> & { expected: Convention; actual: Convention; diagnosis?: Identification };
 export type Tolerance = components['schemas']['Tolerance'];
 
 export interface RunsFilter {
@@ -36,6 +37,7 @@ export interface VerifyRequest {
   readonly actual: { readonly convention: Convention; readonly attitudes: readonly (readonly number[])[] };
   readonly tolerance: Tolerance;
   readonly label?: string;
+  readonly diagnose?: boolean;
 }
 
 export function useVerify() {

@@ -3,6 +3,7 @@ import { TitleBlock } from '../../../components/title-block.tsx';
 import { VerdictMark } from '../../../components/verdict-mark.tsx';
 import { count, dateTime } from '../../../lib/format.ts';
 import { FacetList } from '../../conventions/components/facet-list.tsx';
+import { IdentificationReport } from '../../identify/components/identification-report.tsx';
 import type { Run } from '../api/runs.ts';
 import { angle } from '../model/angle.ts';
 import { ErrorBars } from './error-bars.tsx';
@@ -27,6 +28,12 @@ export function RunReport({ run }: { run: Run }) {
           ))}
         </dl>
       </section>
+      {run.diagnosis && (
+        <section>
+          <h2 className="mb-2 text-lg font-semibold">Why</h2>
+          <IdentificationReport identification={run.diagnosis} />
+        </section>
+      )}
       {run.failures.length > 0 && (
         <section>
           <h2 className="mb-2 text-lg font-semibold">{run.failed > run.failures.length ? `The first ${run.failures.length} failures` : 'Failures'}</h2>
