@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { warning } from './attitude.ts';
 import { pageQuery, timestamp } from './common.ts';
 import { conventionFacets, conventionReference } from './convention.ts';
 import { endpoint } from './endpoint.ts';
@@ -23,6 +24,7 @@ const listed = z.strictObject({ convention: conventionReference, attitudes: atti
 
 export const verifyInput = z.strictObject({
   expected: listed, actual: listed, tolerance,
+  repair: z.enum(['none', 'nearest']).optional().meta({ description: 'What to do with numbers that are no rotation by more than 1e-6, such as quaternions of four digits: refuse them (none, the policy when absent) or take the nearest rotation and warn.' }),
   diagnose: z.boolean().optional().meta({ description: 'Where the verdict is fail, also say which mistakes would explain the actual attitudes. The noise is taken as a fifth of the tolerance.' }),
   times: z.array(z.number({ error: 'must be a finite number' })).optional().meta({ description: 'Seconds, increasing, one for each attitude; with them a diagnosis can find a time lag.' }),
   label: label.optional().meta({ description: 'What was checked; runs can be found by it.' }),
@@ -32,6 +34,7 @@ export const verifyInput = z.strictObject({
 export const verifyOutput = z.strictObject({
   verdict, run: z.string().meta({ description: 'Id of the stored run.' }), count: z.int(), failed: z.int(), worst, statistics, failures,
   summary: z.string().meta({ description: 'The worst error in a plain sentence.' }), engine: z.string(),
+  warnings: z.array(warning).optional().meta({ description: 'What was repaired.' }),
   diagnosis: identification.optional(),
 }).meta({ id: 'VerifyOutput' });
 
@@ -44,7 +47,7 @@ export const verifyEndpoint = endpoint({
   example: {
     expected: { convention: { preset: 'aircraft-euler-deg' }, attitudes: [[30, 10, 20]] },
     actual: { convention: { preset: 'aircraft-quaternion' }, attitudes: [[0.9515, 0.1449, 0.1277, 0.2393]] },
-    tolerance: { angle: 0.05, unit: 'deg' }, label: 'Autopilot attitude', commit: '4f9d2c1',
+    tolerance: { angle: 0.05, unit: 'deg' }, repair: 'nearest', label: 'Autopilot attitude', commit: '4f9d2c1',
   },
 });
 

@@ -26,11 +26,12 @@ it('an integrator learns which convention a unit follows, verifies in it, and ke
   await page.getByLabel('Noise (1 σ)').fill('0.01');
   await page.getByRole('button', { name: 'Identify', exact: true }).click();
   await page.getByText('One explanation fits, and nothing else does.').waitFor();
-  await page.getByText('Reads scalar last, stated scalar first.').waitFor();
+  await page.getByText('Reads scalar last, stated scalar first.', { exact: true }).waitFor();
   await page.getByText(/other statements? of the same numbers/).first().click();
 
   await page.getByRole('button', { name: 'Verify in this convention' }).click();
   await page.getByRole('heading', { name: 'Verify', exact: true }).waitFor();
+  await page.getByRole('checkbox', { name: /take the nearest rotation/ }).check();
   await page.getByLabel('Label').fill('Mast unit, scalar last');
   await page.getByRole('button', { name: 'Verify', exact: true }).click();
   await page.getByRole('heading', { name: 'Mast unit, scalar last' }).waitFor();

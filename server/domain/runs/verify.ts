@@ -2,9 +2,11 @@ import { randomUUID } from 'node:crypto';
 import type { VerifyInput, VerifyOutput } from '#shared/api/runs.ts';
 import { LISTED_AT_MOST } from '#shared/attitude/errors.ts';
 import type { Convention } from '#shared/attitude/convention.ts';
+import { createConverter } from '#shared/attitude/converter.ts';
 import { errorSentence } from '#shared/attitude/verification/error-sentence.ts';
 import { verifyAttitudes, type StatedAttitudes, type Verification } from '#shared/attitude/verification/verify-attitudes.ts';
 import { ENGINE } from '../attitude/engine.ts';
+import { meterWarnings } from '../attitude/meter-warnings.ts';
 import { readAttitudes } from '../attitude/read-attitudes.ts';
 import { pointingInto } from '../attitude/refuse-attitudes.ts';
 import { readTimes } from '../attitude/read-times.ts';
@@ -46,8 +48,9 @@ export async function verify({ identifier }: VerifyContext, request: VerifyInput
   const { tolerance } = request;
   if (request.times) readTimes(request.times, request.actual.attitudes.length, '/actual/attitudes');
   const scale = PER_RADIAN[tolerance.unit];
-  const result = pointingInto('/actual/attitudes', () => verifyAttitudes(expected, actual, tolerance.angle / scale));
+  const result = compared(expected, actual, tolerance.angle / scale, request.repair ?? 'none');
 
+  meterWarnings(meter, result.repaired);
   const diagnosis = request.diagnose && result.failed > 0 ? await diagnose(identifier, expected, actual, request) : null;
   const detail = {
     ...detailOf(result, tolerance, scale, expected.convention, actual.convention),
@@ -58,12 +61,24 @@ export async function verify({ identifier }: VerifyContext, request: VerifyInput
     verdict: result.failed > 0 ? 'fail' : 'pass', count: result.count, failed: result.failed, detail,
   };
   const { worst, statistics, failures, summary, engine } = detail;
-  return { run, answer: { verdict: run.verdict, run: run.id, count: run.count, failed: run.failed, worst: { ...worst, axisBody: [...worst.axisBody] }, statistics, failures: [...failures], summary, engine, ...(diagnosis ? { diagnosis } : {}) } };
+  return { run, answer: { verdict: run.verdict, run: run.id, count: run.count, failed: run.failed, worst: { ...worst, axisBody: [...worst.axisBody] }, statistics, failures: [...failures], summary, engine, ...(result.repaired.length > 0 ? { warnings: result.repaired as NonNullable<VerifyOutput['warnings']> } : {}), ...(diagnosis ? { diagnosis } : {}) } };
 }
 
 function read({ convention: reference, attitudes }: VerifyInput['expected'], pointer: string): StatedAttitudes {
   const convention = resolveConvention(reference, `${pointer}/convention`);
   return { convention, numbers: readAttitudes(attitudes, convention, `${pointer}/attitudes`) };
+}
+
+/** What is wrong with one side points into that side. */
+function compared(expected: StatedAttitudes, actual: StatedAttitudes, tolerance: number, repair: 'none' | 'nearest'): Verification {
+  return pointingInto('/actual/attitudes', () => {
+    try {
+      return verifyAttitudes(expected, actual, tolerance, repair);
+    } catch (error) {
+      pointingInto('/expected/attitudes', () => createConverter(expected.convention, expected.convention, { repair }).convert(expected.numbers));
+      throw error;
+    }
+  });
 }
 
 function detailOf({ angles, worst, statistics }: Verification, tolerance: VerifyInput['tolerance'], scale: number, expected: Convention, actual: Convention): RunDetail {

@@ -3,6 +3,7 @@ import type { Convention, QuaternionConvention } from '../convention.ts';
 import { createConverter } from '../converter.ts';
 import { AttitudeError } from '../errors.ts';
 import { errorRotation } from '../rotations/error-rotation.ts';
+import type { AttitudeWarning } from '../warnings.ts';
 import type { Quaternion } from '../rotations/quaternion.ts';
 import { statisticsOf, type Statistics } from './statistics.ts';
 
@@ -25,6 +26,8 @@ export interface Verification {
     readonly axisBody: readonly [number, number, number];
   };
   readonly statistics: Statistics;
+  /** What was repaired on either side; near-lock warnings have no place here, since no angle is compared. */
+  readonly repaired: readonly AttitudeWarning[];
 }
 
 /**
@@ -32,12 +35,14 @@ export interface Verification {
  * between the two attitudes, never a difference of angles: it does not depend on either representation.
  *
  * @param tolerance - rad.
+ * @param repair - what to do with numbers that are no rotation by more than 1e-6, such as those of a few digits: refuse them, or take the nearest rotation.
  * @throws AttitudeError for attitudes that cannot be used, and `count-mismatch` where the lists differ in length.
  * Accuracy: 2.5e-16 rad beyond that of the numbers given.
  */
-export function verifyAttitudes(expected: StatedAttitudes, actual: StatedAttitudes, tolerance: number): Verification {
+export function verifyAttitudes(expected: StatedAttitudes, actual: StatedAttitudes, tolerance: number, repair: 'none' | 'nearest' = 'none'): Verification {
   const common = commonConvention(expected.convention);
-  const [e, a] = [expected, actual].map(({ convention, numbers }) => createConverter(convention, common).convert(numbers)) as [Float64Array, Float64Array];
+  const converters = [expected, actual].map(({ convention }) => createConverter(convention, common, { repair, warnWithinDeg: 0 }));
+  const [e, a] = [expected, actual].map(({ numbers }, side) => converters[side]!.convert(numbers)) as [Float64Array, Float64Array];
   if (e.length !== a.length) throw new AttitudeError('count-mismatch', `${e.length / 4} expected attitudes cannot be compared with ${a.length / 4} actual ones.`);
   const count = e.length / 4;
   const angles = new Float64Array(count);
@@ -49,7 +54,7 @@ export function verifyAttitudes(expected: StatedAttitudes, actual: StatedAttitud
     if (angle > tolerance) failed++;
     if (angle > worst.angle) worst = { index: i, angle, axisBody: axis };
   }
-  return { count, failed, angles, worst, statistics: statisticsOf(angles) };
+  return { count, failed, angles, worst, statistics: statisticsOf(angles), repaired: converters.flatMap((converter) => converter.warnings()).filter(({ code }) => code === 'renormalised' || code === 'reorthonormalised') };
 }
 
 /** Quaternions between NED, or the named frame that is meant, and FRD. */

@@ -94,6 +94,17 @@ describe('runs', () => {
     await get('/runs/nowhere.junit.xml').expect(404);
   });
 
+  it('refuse numbers of few digits unless the nearest rotation is asked for, which is then said; each side by its own place', async () => {
+    const rounded = { ...comparison([[30, 10, 20]]), expected: { convention: { preset: 'aircraft-quaternion' }, attitudes: [[0.9515, 0.1449, 0.1277, 0.2393]] }, actual: { convention: { preset: 'aircraft-euler-deg' }, attitudes: [[30, 10, 20]] } };
+    const refused = await verify(rounded);
+    expect([refused.status, refused.body.code, refused.body.errors[0].pointer]).toEqual([422, 'not-a-rotation', '/expected/attitudes/0']);
+    const swapped = await verify({ ...rounded, expected: rounded.actual, actual: rounded.expected });
+    expect(swapped.body.errors[0].pointer).toBe('/actual/attitudes/0');
+    const { body } = await verify({ ...rounded, repair: 'nearest' }).expect(200);
+    expect(body.verdict).toBe('pass');
+    expect(body.warnings).toMatchObject([{ code: 'renormalised', count: 1, indices: [0] }]);
+  });
+
   it('are not left behind by refused calls', async () => {
     const count = async () => ((await service.services.database.sequelize.query('SELECT COUNT(*) AS n FROM runs'))[0] as { n: number }[])[0]!.n;
     const before = await count();

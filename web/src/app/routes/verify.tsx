@@ -19,6 +19,7 @@ export function Component() {
   const [expected, setExpected] = useState(() => given?.expected ?? emptyRecording(statementOf('aircraft-euler-deg')));
   const [actual, setActual] = useState(() => given?.actual ?? emptyRecording(statementOf('aircraft-quaternion')));
   const [diagnose, setDiagnose] = useState(true);
+  const [repair, setRepair] = useState(false);
   const [tolerance, setTolerance] = useState({ angle: '0.1', unit: 'deg' as Tolerance['unit'] });
   const [label, setLabel] = useState('');
   const left = useRead(expected);
@@ -37,7 +38,7 @@ export function Component() {
         if (obstacle) return;
         verify.mutate({
           expected: { convention: expected.statement.convention, attitudes: left.attitudes }, actual: { convention: actual.statement.convention, attitudes: right.attitudes },
-          tolerance: { angle: within, unit: tolerance.unit }, ...(label.trim() && { label: label.trim() }), diagnose,
+          tolerance: { angle: within, unit: tolerance.unit }, ...(label.trim() && { label: label.trim() }), diagnose, ...(repair && { repair: 'nearest' as const }),
         }, { onSuccess: ({ run }) => navigate(`/runs/${run}`) });
       }}>
         <div className="grid gap-6 lg:grid-cols-2">
@@ -56,6 +57,8 @@ export function Component() {
         </div>
         <label className="flex items-start gap-2"><input type="checkbox" className="mt-1" checked={diagnose} onChange={(event) => setDiagnose(event.target.checked)} />
           <span>If it fails, say which mistake of convention would explain it.</span></label>
+        <label className="flex items-start gap-2"><input type="checkbox" className="mt-1" checked={repair} onChange={(event) => setRepair(event.target.checked)} />
+          <span>Numbers of few digits: take the nearest rotation. <span className="text-soft">Otherwise a quaternion or a matrix off by more than 10⁻⁶ is refused.</span></span></label>
         {obstacle && <Notice kind="note" title={obstacle} />}
         {verify.error && <ProblemNotice error={verify.error} />}
       </form>

@@ -38,6 +38,7 @@ export interface VerifyRequest {
   readonly tolerance: Tolerance;
   readonly label?: string;
   readonly diagnose?: boolean;
+  readonly repair?: 'none' | 'nearest';
 }
 
 export function useVerify() {
