@@ -1,10 +1,13 @@
-import type { Convention, DcmConvention } from '../../convention.ts';
+import type { Convention, DcmConvention, EulerConvention } from '../../convention.ts';
 import { createConverter } from '../../converter.ts';
 import { readingOf } from '../../reading.ts';
 import { frameRotation, multiply } from '../fit/small-matrix.ts';
 import type { DiscriminatingAttitude } from '../identification.ts';
 import { Predictor } from './predicted-numbers.ts';
 import type { Choice } from './statement-choice.ts';
+
+/** The convention of the angles below: whole degrees come out as exact as the reference's convention allows. */
+export const benchAngles = (reference: string): EulerConvention => ({ representation: 'euler', reference, body: 'FRD', sequence: 'ZYX', motion: 'intrinsic', order: [1, 2, 3], signs: [1, 1, 1], unit: 'deg', range: 'signed' });
 
 /** Heading, pitch and bank, degrees, that a tilting table on a surveyed bench reaches; plain ones first. */
 const BENCH: readonly (readonly [number, number, number])[] = [
@@ -31,19 +34,19 @@ export function discriminatingAttitudes(choices: readonly { readonly choice: Cho
   const evenSign = choices.map(({ choice: { convention, statement } }) => convention.representation === 'quaternion' && !statement.numbersAre);
   const candidates = BENCH.map((angles) => {
     const c = multiply(multiply(frameRotation(angles[2] * DEG, 0, 0), frameRotation(0, angles[1] * DEG, 0)), frameRotation(0, 0, angles[0] * DEG));
-    return { c, groups: grouped(predictors.map((predictor) => predictor.listed(c)), tolerances, periods, evenSign) };
+    return { angles, groups: grouped(predictors.map((predictor) => predictor.listed(c)), tolerances, periods, evenSign) };
   });
 
-  const fromStandard = createConverter(standard, reference, { warnWithinDeg: 0 });
+  const fromAngles = createConverter(benchAngles(standard.reference), reference, { warnWithinDeg: 0 });
   let parts: readonly number[][] = [choices.map((_, k) => k)];
   const proposed: DiscriminatingAttitude[] = [];
   while (proposed.length < PROPOSED) {
     const gains = candidates.map(({ groups }) => pairs(parts) - pairs(refined(parts, groups.of)));
     const best = gains.reduce((most, gain, k) => (gain > gains[most]! ? k : most), 0);
     if (gains[best]! <= 0) break;
-    const { c, groups } = candidates[best]!;
+    const { angles, groups } = candidates[best]!;
     parts = refined(parts, groups.of);
-    const attitude = [...fromStandard.convert(c)];
+    const attitude = [...fromAngles.convert(Float64Array.from(angles))];
     const predictions = groups.numbers.map((numbers, group) => ({ numbers, explanations: groups.of.flatMap((each, k) => (each === group ? [k] : [])) }));
     proposed.push({ attitude, reading: readingOf(reference, attitude), separates: { answers: predictions.length, explanations: choices.length, predictions: predictions.sort((x, y) => x.explanations[0]! - y.explanations[0]!) } });
   }

@@ -1,6 +1,7 @@
 import type { Convention, DcmConvention } from '../../convention.ts';
 import { createConverter } from '../../converter.ts';
 import { readingOf } from '../../reading.ts';
+import { benchAngles } from '../explain/discriminating.ts';
 import { frameRotation, multiply } from '../fit/small-matrix.ts';
 import { expectedNumbers, type RateHypothesis } from './hypotheses.ts';
 import type { DiscriminatingRate } from './rate-identification.ts';
@@ -15,12 +16,12 @@ const PROPOSED = 3;
 
 /** Up to three attitudes to hold, each with a body axis to turn about, that split what remains best. */
 export function discriminatingRates(hypotheses: readonly RateHypothesis[], reference: Convention, standard: DcmConvention, sigma: number): DiscriminatingRate[] {
-  const fromStandard = createConverter(standard, reference, { warnWithinDeg: 0 });
+  const fromAngles = createConverter(benchAngles(standard.reference), reference, { warnWithinDeg: 0 });
   const tolerance = Math.max(6 * sigma, 0.02 * RATE);
   const candidates = BENCH.flatMap((angles) => AXES.map((_, axis) => {
     const c = multiply(multiply(frameRotation(angles[2] * DEG, 0, 0), frameRotation(0, angles[1] * DEG, 0)), frameRotation(0, 0, angles[0] * DEG));
     const omega = [0, 1, 2].map((k) => (k === axis ? RATE : 0));
-    return { c, axis, predicted: hypotheses.map((hypothesis) => expectedNumbers(hypothesis, { c, omega })) };
+    return { angles, axis, predicted: hypotheses.map((hypothesis) => expectedNumbers(hypothesis, { c, omega })) };
   }));
   let parts: readonly number[][] = [hypotheses.map((_, k) => k)];
   const proposed: DiscriminatingRate[] = [];
@@ -29,9 +30,9 @@ export function discriminatingRates(hypotheses: readonly RateHypothesis[], refer
     const best = split.reduce((least, each, k) => (pairs(each) < pairs(split[least]!) ? k : least), 0);
     if (pairs(split[best]!) >= pairs(parts)) break;
     parts = split[best]!;
-    const { c, axis, predicted } = candidates[best]!;
+    const { angles, axis, predicted } = candidates[best]!;
     const groups = grouped(hypotheses.map((_, k) => k), predicted, hypotheses, tolerance);
-    const attitude = [...fromStandard.convert(c)];
+    const attitude = [...fromAngles.convert(Float64Array.from(angles))];
     proposed.push({
       attitude, reading: `${readingOf(reference, attitude)} Turn at 10°/s about the body's ${AXES[axis]} axis.`,
       separates: { answers: groups.length, explanations: hypotheses.length, predictions: groups.map((explanations) => ({ numbers: predicted[explanations[0]!] ?? [], explanations })) },

@@ -84,7 +84,8 @@ describe('identifyAttitudes on data that do not tell', () => {
     const { discriminating, explanations } = said({ truth: { convention: QUATERNION! }, kind: 'levelOneHeading', sigma: 0, statedSigma: 0 });
     expect(discriminating.length).toBeGreaterThan(0);
     expect(discriminating.length).toBeLessThanOrEqual(3);
-    const [{ separates, reading }] = discriminating as [typeof discriminating[0]];
+    const [{ separates, reading, attitude }] = discriminating as [typeof discriminating[0]];
+    expect(attitude).toHaveLength(9);
     expect(separates.explanations).toBe(explanations.length);
     expect(separates.answers).toBeGreaterThan(1);
     expect(separates.predictions.flatMap((prediction) => prediction.explanations).length).toBe(explanations.length);

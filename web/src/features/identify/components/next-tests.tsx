@@ -11,7 +11,7 @@ export function NextTests({ tests }: { tests: readonly DiscriminatingAttitude[] 
       <ol className="space-y-4">
         {tests.map(({ attitude, reading, separates }, index) => (
           <li key={index} className="border border-rule px-4 py-3">
-            <p className="font-semibold">{reading}</p>
+            <p className="font-semibold first-letter:uppercase">{reading}</p>
             <p className="text-sm text-soft">In the reference’s convention: <span className="figures">{attitude.map(number).join(', ')}</span>. It splits {separates.explanations} explanations into {separates.answers} answers.</p>
             <dl className="mt-2 grid gap-x-4 gap-y-1 sm:grid-cols-[1fr_auto]">
               {separates.predictions.slice(0, SHOWN).map(({ numbers, explanations }, k) => (
