@@ -18,6 +18,7 @@ try {
   await convertTheRecording();
   await convertAUnit();
   await refuse();
+  await diagnose();
   await waitWhenAsked();
 } catch (error) {
   check('the examples run', false, error.stack);
@@ -72,6 +73,14 @@ async function convertTheRecording() {
   const near = margins.filter((margin) => margin < 1).length;
   const said = `Nearest to gimbal lock at ${rows[margins.indexOf(least)][0]} s, ${least.toFixed(4)}° from it`;
   check('the Node script tells of every attitude near gimbal lock, and of the nearest', node.stdout.includes(`Warning near-gimbal-lock: ${near} attitudes.`) && node.stdout.includes(said), `${node.stdout}; meant ${near}, ${said}`);
+}
+
+/** Each slip is named, alone, by what a person would change. */
+async function diagnose() {
+  const { status, stdout, stderr } = await run(process.execPath, ['examples/diagnose-a-converter.mjs']);
+  const lines = stdout.split('\n').filter((line) => line.startsWith('  '));
+  const named = [/^ {2}it: reads scalar last, stated scalar first$/, /^ {2}it: reads (reference-to-body, stated body-to-reference|Shuster's product, stated Hamilton's)$/, /^ {2}it: reads body axes FLU, stated FRD$/, /^ {2}it: the north reference is off by -?5° about down$/, /^ {2}it: comes (39\.\d|40\.\d) ms late$/];
+  check('the five slips are diagnosed', status === 0 && lines.length === named.length && named.every((pattern, i) => pattern.test(lines[i])), stdout + stderr);
 }
 
 /** A unit's own recording, converted back by the service with nothing but the unit's convention, is the flight again. */
