@@ -7,6 +7,7 @@ import { connect, disconnect, type Database } from './db/database.ts';
 import { apiKeysRepository } from './db/repositories/api-keys.ts';
 import { limitsRepository } from './db/repositories/limits.ts';
 import { runsRepository } from './db/repositories/runs.ts';
+import { streamedCallsRepository } from './db/repositories/streamed-calls.ts';
 import { usageRepository } from './db/repositories/usage.ts';
 import { historyRepository } from './db/repositories/history.ts';
 import { peopleRepository } from './db/repositories/people.ts';
@@ -20,6 +21,7 @@ import { SessionTokens } from './domain/sessions/session-tokens.ts';
 import { sessionCookie } from './http/cookie.ts';
 import { createRateLimiter } from './http/rate-limiter.ts';
 import { Identifier } from './identification/identifier.ts';
+import { BatchThread } from './streaming/batch-thread.ts';
 
 export interface ServiceOptions {
   readonly config: Config;
@@ -34,6 +36,7 @@ export async function createServices({ config, logger, clock = Date.now }: Servi
   const apiKeys = apiKeysRepository(database);
   const crossChecker = new CrossChecker();
   const identifier = new Identifier();
+  const batches = new BatchThread();
   const usage = usageRepository(database);
   return {
     config, logger, clock, database, apiKeys,
@@ -42,6 +45,7 @@ export async function createServices({ config, logger, clock = Date.now }: Servi
     history: historyRepository(database),
     usage,
     runs: runsRepository(database),
+    streamedCalls: streamedCallsRepository(database),
     limits: await LimitTable.load(limitsRepository(database)),
     quota: new Quota(usage, clock),
     parallel: new ParallelCalls(),
@@ -51,9 +55,11 @@ export async function createServices({ config, logger, clock = Date.now }: Servi
     cookie: sessionCookie(config.publicUrl),
     crossChecker,
     identifier,
+    batches,
     async close() {
       await crossChecker.close();
       await identifier.close();
+      await batches.close();
       await disconnect(database);
     },
   };

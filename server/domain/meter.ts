@@ -34,25 +34,59 @@ export class QuotaMeter implements Meter {
 
   spend(attitudes: number, pointer: string): void {
     const { attitudesPerCall, attitudesPerMonth } = this.#limits;
-    if (attitudes > attitudesPerCall) {
-      throw new DomainError('batch-too-large', `${attitudes} are more than the ${attitudesPerCall} that one call of yours may carry.`, [{ pointer, message: `must hold at most ${attitudesPerCall}` }]);
-    }
+    refuseBatchAbove(attitudesPerCall, attitudes, pointer);
     const reservation = this.#quota.reserve(this.#subject, attitudes, attitudesPerMonth);
-    if (!reservation) {
-      const left = this.#quota.left(this.#subject, attitudesPerMonth);
-      const seconds = Math.ceil((nextMonth(this.#now) - this.#now) / 1000);
-      throw new DomainError('quota-exceeded', `${attitudes} attitudes are more than the ${left} left of your ${attitudesPerMonth} this month; the quota starts anew on ${new Date(nextMonth(this.#now)).toISOString()}.`, [], seconds);
-    }
+    if (!reservation) throw this.quotaExceeded(attitudes);
     this.#reservations.push(reservation);
     this.attitudes += attitudes;
   }
 
+  /** Sets aside as many of these attitudes as are left this month, for a part of a stream; returns how many. */
+  spendUpTo(attitudes: number): number {
+    const { attitudesPerMonth } = this.#limits;
+    const granted = Math.min(attitudes, this.#quota.left(this.#subject, attitudesPerMonth));
+    const reservation = this.#quota.reserve(this.#subject, granted, attitudesPerMonth);
+    if (!reservation) return 0;
+    this.#reservations.push(reservation);
+    this.attitudes += granted;
+    return granted;
+  }
+
+  quotaExceeded(attitudes: number): DomainError {
+    const { attitudesPerMonth } = this.#limits;
+    const left = this.#quota.left(this.#subject, attitudesPerMonth);
+    const seconds = Math.ceil((nextMonth(this.#now) - this.#now) / 1000);
+    return new DomainError('quota-exceeded', `${attitudes} attitudes are more than the ${left} left of your ${attitudesPerMonth} this month; the quota starts anew on ${new Date(nextMonth(this.#now)).toISOString()}.`, [], seconds);
+  }
+
+  /** Books or gives back what was set aside since the last time. */
   settle(answered: boolean): void {
-    for (const reservation of this.#reservations) {
+    for (const reservation of this.#reservations.splice(0)) {
       if (answered) reservation.book();
       else reservation.release();
     }
   }
+}
+
+/** Counts one batch away from its caller's quota, which is asked afterwards. */
+export class BatchMeter implements Meter {
+  attitudes = 0;
+  warnings = 0;
+  readonly warningCodes: string[] = [];
+  readonly #most: number;
+
+  constructor(most: number) {
+    this.#most = most;
+  }
+
+  spend(attitudes: number, pointer: string): void {
+    refuseBatchAbove(this.#most, attitudes, pointer);
+    this.attitudes += attitudes;
+  }
+}
+
+function refuseBatchAbove(most: number, attitudes: number, pointer: string): void {
+  if (attitudes > most) throw new DomainError('batch-too-large', `${attitudes} are more than the ${most} that one call of yours may carry.`, [{ pointer, message: `must hold at most ${most}` }]);
 }
 
 /** For callers without a quota: visitors, who compute nothing. */

@@ -2,6 +2,7 @@ import express, { Router, type Express } from 'express';
 import helmet from 'helmet';
 import { BASE_PATH } from '#shared/api/endpoint.ts';
 import type { Services } from '../services.ts';
+import { compressAnswers } from './compress.ts';
 import { mountConsole } from './console.ts';
 import { mountHealth } from './health-pages.ts';
 import { mountDocumentation } from './documentation.ts';
@@ -23,6 +24,7 @@ export function createApp(services: Services): Express {
   app.set('etag', false);
   app.set('query parser', 'simple');
   app.use(helmet({ contentSecurityPolicy: contentSecurityPolicy(services.config.publicUrl), strictTransportSecurity: services.config.publicUrl.protocol === 'https:' }));
+  app.use(compressAnswers());
 
   const api = Router({ caseSensitive: true, strict: true });
   api.use((_request, response, next) => {

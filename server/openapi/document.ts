@@ -42,10 +42,13 @@ function operationOf(endpoint: Endpoint, schemas: SchemaCollection): Record<stri
     description: [endpoint.description, whoMay(endpoint)].filter(Boolean).join('\n\n'),
     security: endpoint.auth === 'public' || endpoint.auth === 'visitor' ? [] : endpoint.auth === 'session' ? [{ session: [] }] : [{ apiKey: [] }, { session: [] }],
     ...(parameters.length > 0 ? { parameters } : {}),
-    ...(endpoint.body ? { requestBody: { required: true, content: { 'application/json': { schema: schemas.of(endpoint.body, 'input'), ...(endpoint.example === undefined ? {} : { example: endpoint.example }) } } } } : {}),
+    ...(endpoint.body ? { requestBody: { required: true, content: { 'application/json': { schema: schemas.of(endpoint.body, 'input'), ...(endpoint.example === undefined ? {} : { example: endpoint.example }) }, ...rowContents(endpoint) } } } : {}),
     responses: responsesOf(endpoint, schemas),
   };
 }
+
+/** Rows are bytes to OpenAPI: what they hold is said in the endpoint's description. */
+const rowContents = ({ rowTypes = [] }: Endpoint): Record<string, unknown> => Object.fromEntries(rowTypes.map((type) => [type, {}]));
 
 function whoMay({ auth, permission }: Endpoint): string {
   if (auth === 'public' || auth === 'visitor') return '';
@@ -68,7 +71,7 @@ function responsesOf(endpoint: Endpoint, schemas: SchemaCollection): Record<stri
   const success = {
     description: STATUS_CODES[endpoint.status],
     headers: requestIdHeader,
-    ...(endpoint.response ? { content: { [endpoint.contentType ?? 'application/json']: { schema: schemas.of(endpoint.response, 'output') } } } : {}),
+    ...(endpoint.response ? { content: { [endpoint.contentType ?? 'application/json']: { schema: schemas.of(endpoint.response, 'output') }, ...rowContents(endpoint) } } : {}),
   };
   const refusals = [...endpoint.problems, 500].map((status) => [String(status), {
     description: `${STATUS_CODES[status]}. Codes: ${codesWith(status)}.`,

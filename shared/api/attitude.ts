@@ -2,6 +2,7 @@ import { z } from 'zod';
 import { conventionFacets, conventionReference } from './convention.ts';
 import { endpoint } from './endpoint.ts';
 import { ATTITUDES_PER_CALL, CROSS_CHECKED_PER_CALL } from './limits.ts';
+import { STREAMED_TYPES } from './media-types.ts';
 import { attitudeRows } from './numbers.ts';
 
 const worstCase = z.strictObject({
@@ -54,13 +55,30 @@ export const convertOutput = z.strictObject({
   engine: z.string().meta({ description: 'Name and version of the numerical core that answered.' }),
 }).meta({ id: 'ConvertOutput' });
 
+const inQuery = (which: string) => z.string().optional().meta({ description: `${which}, where the body is only rows: the id of a preset, or a convention as JSON. JSON bodies state it themselves.`, examples: ['aircraft-quaternion'] });
+
+/** What the query says where the body is only rows. */
+export const convertQuery = z.strictObject({
+  from: inQuery('Convention of the body'),
+  to: inQuery('Convention of the answer'),
+  repair: z.enum(['none', 'nearest']).optional().meta({ description: 'As options.repair of a JSON body.' }),
+  warnWithinDeg: z.string().regex(/^(?:90(?:\.0+)?|[1-8]?\d(?:\.\d+)?)$/, { error: 'must be a number from 0 to 90' }).optional().meta({ description: 'As options.warnWithinDeg of a JSON body.' }),
+});
+
+/** A convention that the query carries as JSON, under the name of its parameter. */
+export const streamedConvention = z.strictObject({ from: conventionReference.optional(), to: conventionReference.optional() });
+
 export const convertEndpoint = endpoint({
   id: 'convertAttitudes', method: 'post', path: '/convert', tag: 'Attitude',
   summary: 'Convert attitudes between two conventions',
-  description: `Up to ${ATTITUDES_PER_CALL.toLocaleString('en')} attitudes a call. One bad attitude refuses the batch and names every bad index (first 100). 90 given in degrees is exact gimbal lock; the double nearest to π/2 given in radians is not.`,
+  description: [
+    `Up to ${ATTITUDES_PER_CALL.toLocaleString('en')} attitudes a JSON call. One bad attitude refuses the batch and names every bad index (first 100). 90 given in degrees is exact gimbal lock; the double nearest to π/2 given in radians is not.`,
+    `Body and answer may also be rows alone, any of these to any: application/x-ndjson (an array a line; the answer's last line is an object with count and warnings), text/csv (RFC 4180; \`header=present\` where the first line names the columns) and application/octet-stream (little-endian float64, nothing between the rows). Content-Type and Accept choose; conventions stand in the query. Rows to rows are streamed, as many as the month's quota allows: read while you send. With JSON on one side the call is a batch like any other.`,
+    `What is wrong in the first MiB is refused with a problem document. A bad row further on ends the answer where its row would stand: NDJSON with \`{"problem":{…,"row":n}}\`, CSV with a line \`problem,<code>,<row>,"<detail>"\`, float64 with a row of NaN; the trailer Dextral-Problem says \`<code>;row=<n>\`, and the history keeps it. The rows before it were answered and are metered. Trailer Dextral-Warnings counts warnings by code.`,
+  ].join('\n\n'),
   auth: 'caller', permission: 'attitude.compute', recordsSessions: true,
-  body: convertInput, status: 200, response: convertOutput,
-  problems: [400, 401, 403, 413, 415, 422, 429, 503],
+  query: convertQuery, body: convertInput, rowTypes: STREAMED_TYPES, status: 200, response: convertOutput,
+  problems: [400, 401, 403, 406, 413, 415, 422, 429, 503],
   example: { from: { preset: 'aircraft-euler-deg' }, to: { preset: 'aircraft-quaternion' }, attitudes: [[30, 10, 20]], options: { readings: true } },
 });
 

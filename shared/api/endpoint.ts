@@ -24,6 +24,8 @@ export interface Endpoint<
   readonly params?: Params;
   readonly query?: Query;
   readonly body?: Body;
+  /** Content types beside JSON in which body and answer may be rows of numbers alone; conventions then stand in the query. */
+  readonly rowTypes?: readonly string[];
   readonly status: 200 | 201 | 204;
   /** What the answer holds; absent where it has no body. */
   readonly response?: Response;

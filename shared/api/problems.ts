@@ -19,6 +19,7 @@ export const PROBLEMS = {
   'unknown-preset': { status: 422, title: 'There is no preset with this id' },
   'unknown-interface': { status: 422, title: 'There is no published interface version with this name' },
   'method-not-allowed': { status: 405, title: 'This address does not answer to this method' },
+  'not-acceptable': { status: 406, title: 'None of the content types asked for can be given' },
   'conflict': { status: 409, title: 'The request contradicts what is there' },
   'already-revoked': { status: 409, title: 'The API key was revoked before' },
   'body-too-large': { status: 413, title: 'The body is too large' },

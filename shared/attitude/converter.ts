@@ -31,6 +31,11 @@ export interface Converter {
    * @throws AttitudeError naming every bad attitude of this call (first 100); then nothing counts as written.
    */
   convert(input: Float64Array, output?: Float64Array): Float64Array;
+  /**
+   * As `convert`, but ends before the first bad attitude and says what is wrong with it: everything before it counts
+   * as converted, nothing after it has been looked at. For parts of a stream whose beginning has been answered.
+   */
+  convertUntilRefused(input: Float64Array): { readonly output: Float64Array; readonly refusal: AttitudeError | null };
   /** Everything to be warned of so far. */
   warnings(): AttitudeWarning[];
 }
@@ -49,11 +54,28 @@ export function createConverter(from: Convention, to: Convention, options: Conve
   let converted = 0;
 
   function convert(input: Float64Array, output?: Float64Array): Float64Array {
+    const out = output ?? new Float64Array((input.length / inputWidth) * outputWidth);
+    const { faults, count } = convertInto(input, out, false);
+    faults.throwIfAny(count);
+    converted += count;
+    return out;
+  }
+
+  function convertUntilRefused(input: Float64Array): { output: Float64Array; refusal: AttitudeError | null } {
+    const out = new Float64Array(Math.floor(input.length / inputWidth) * outputWidth);
+    const { faults, count, done } = convertInto(input, out, true);
+    const refusal = faults.error(count);
+    converted += done;
+    return { output: out.subarray(0, done * outputWidth), refusal };
+  }
+
+  function convertInto(input: Float64Array, out: Float64Array, stopAtFault: boolean): { faults: Faults; count: number; done: number } {
     const count = input.length / inputWidth;
     if (!Number.isInteger(count)) throw new AttitudeError('count-mismatch', `${input.length} numbers are not a whole count of attitudes of ${inputWidth} numbers each.`);
-    const out = output ?? new Float64Array(count * outputWidth);
     const faults = new Faults();
-    for (let i = 0; i < count; i++) {
+    let i = 0;
+    for (; i < count; i++) {
+      if (stopAtFault && faults.any) break;
       const status = read(input, i * inputWidth);
       if (status === REFUSED) {
         const { code, ...fault } = refusalOf(from, input.slice(i * inputWidth, (i + 1) * inputWidth));
@@ -65,9 +87,7 @@ export function createConverter(from: Convention, to: Convention, options: Conve
       if (written === NOT_REPRESENTABLE) faults.add('not-representable', { index: converted + i, message: 'is a half turn, for which no Gibbs vector exists' });
       else if (scratch[COSINE]! < cosineToReport && to.representation === 'euler') reportLock(i, written === LOCKED, to, out);
     }
-    faults.throwIfAny(count);
-    converted += count;
-    return out;
+    return { faults, count, done: faults.any ? i - 1 : i };
   }
 
   function reportLock(i: number, locked: boolean, convention: EulerConvention, out: Float64Array): void {
@@ -77,7 +97,7 @@ export function createConverter(from: Convention, to: Convention, options: Conve
     tally.lock(converted + i, scratch[COSINE]!, locked, convention, listed, middle);
   }
 
-  return { from, to, inputWidth, outputWidth, convert, warnings: () => tally.warnings() };
+  return { from, to, inputWidth, outputWidth, convert, convertUntilRefused, warnings: () => tally.warnings() };
 }
 
 function refuseImproper(convention: Convention): void {
@@ -97,10 +117,19 @@ class Faults {
     if (this.#listed.length < LISTED_AT_MOST) this.#listed.push(fault);
   }
 
+  get any(): boolean {
+    return this.#code !== null;
+  }
+
   throwIfAny(count: number): void {
-    if (this.#code === null) return;
+    const error = this.error(count);
+    if (error) throw error;
+  }
+
+  error(count: number): AttitudeError | null {
+    if (this.#code === null) return null;
     const first = this.#listed[0]!;
     const subject = this.#count === 1 ? 'One attitude' : `${this.#count} attitudes`;
-    throw new AttitudeError(this.#code, `${subject} of ${count} cannot be used; attitude ${first.index} ${first.message}.`, this.#listed, this.#count);
+    return new AttitudeError(this.#code, `${subject} of ${count} cannot be used; attitude ${first.index} ${first.message}.`, this.#listed, this.#count);
   }
 }

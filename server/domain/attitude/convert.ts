@@ -15,7 +15,7 @@ import { readAttitudes } from './read-attitudes.ts';
 import { pointingInto } from './refuse-attitudes.ts';
 
 export interface ConvertContext {
-  readonly crossChecker: CrossChecker;
+  readonly crossChecker: Pick<CrossChecker, 'check'>;
 }
 
 /** Converts a batch between two conventions; one bad attitude refuses the whole batch. */
@@ -48,7 +48,8 @@ export async function convertAttitudes({ crossChecker }: ConvertContext, request
   };
 }
 
-const coreOptions = ({ repair, warnWithinDeg }: NonNullable<ConvertInput['options']>) => ({
+/** The options that the numerical core knows. */
+export const coreOptions = ({ repair, warnWithinDeg }: NonNullable<ConvertInput['options']>) => ({
   ...(repair === undefined ? {} : { repair }),
   ...(warnWithinDeg === undefined ? {} : { warnWithinDeg }),
 });

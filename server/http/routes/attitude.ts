@@ -6,10 +6,16 @@ import { convertAttitudes } from '#server/domain/attitude/convert.ts';
 import { identify } from '#server/domain/attitude/identify.ts';
 import { convertRates } from '#server/domain/attitude/rates.ts';
 import type { Services } from '#server/services.ts';
+import { mountConvertBatches } from '../batches/convert-batches.ts';
+import { refuseStatedTwice } from '../batches/query.ts';
 import { mount } from '../mount.ts';
 
 export function attitudeRoutes(services: Services, router: Router): void {
-  mount(services, router, convertEndpoint)(({ body, meter }) => convertAttitudes(services, body, meter));
+  mountConvertBatches(services, router);
+  mount(services, router, convertEndpoint)(({ query, body, meter }) => {
+    refuseStatedTwice(query);
+    return convertAttitudes(services, body, meter);
+  });
   mount(services, router, ratesEndpoint)(({ body, meter }) => convertRates(body, meter));
   mount(services, router, identifyEndpoint)(({ body, meter }) => identify(services, body, meter));
 }

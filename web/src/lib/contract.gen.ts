@@ -11,7 +11,11 @@ export interface paths {
         put?: never;
         /**
          * Convert attitudes between two conventions
-         * @description Up to 10,000 attitudes a call. One bad attitude refuses the batch and names every bad index (first 100). 90 given in degrees is exact gimbal lock; the double nearest to π/2 given in radians is not.
+         * @description Up to 10,000 attitudes a JSON call. One bad attitude refuses the batch and names every bad index (first 100). 90 given in degrees is exact gimbal lock; the double nearest to π/2 given in radians is not.
+         *
+         *     Body and answer may also be rows alone, any of these to any: application/x-ndjson (an array a line; the answer's last line is an object with count and warnings), text/csv (RFC 4180; `header=present` where the first line names the columns) and application/octet-stream (little-endian float64, nothing between the rows). Content-Type and Accept choose; conventions stand in the query. Rows to rows are streamed, as many as the month's quota allows: read while you send. With JSON on one side the call is a batch like any other.
+         *
+         *     What is wrong in the first MiB is refused with a problem document. A bad row further on ends the answer where its row would stand: NDJSON with `{"problem":{…,"row":n}}`, CSV with a line `problem,<code>,<row>,"<detail>"`, float64 with a row of NaN; the trailer Dextral-Problem says `<code>;row=<n>`, and the history keeps it. The rows before it were answered and are metered. Trailer Dextral-Warnings counts warnings by code.
          *
          *     Roles: administrator, integrator, engineer.
          */
@@ -1314,7 +1318,16 @@ export type $defs = Record<string, never>;
 export interface operations {
     convertAttitudes: {
         parameters: {
-            query?: never;
+            query?: {
+                /** @description Convention of the body, where the body is only rows: the id of a preset, or a convention as JSON. JSON bodies state it themselves. */
+                from?: string;
+                /** @description Convention of the answer, where the body is only rows: the id of a preset, or a convention as JSON. JSON bodies state it themselves. */
+                to?: string;
+                /** @description As options.repair of a JSON body. */
+                repair?: "none" | "nearest";
+                /** @description As options.warnWithinDeg of a JSON body. */
+                warnWithinDeg?: string;
+            };
             header?: never;
             path?: never;
             cookie?: never;
@@ -1342,6 +1355,9 @@ export interface operations {
                  *     }
                  */
                 "application/json": components["schemas"]["ConvertInput"];
+                "application/x-ndjson": unknown;
+                "text/csv": unknown;
+                "application/octet-stream": unknown;
             };
         };
         responses: {
@@ -1354,6 +1370,9 @@ export interface operations {
                 };
                 content: {
                     "application/json": components["schemas"]["ConvertOutput"];
+                    "application/x-ndjson": unknown;
+                    "text/csv": unknown;
+                    "application/octet-stream": unknown;
                 };
             };
             /** @description Bad Request. Codes: malformed-json, malformed-request, invalid-cursor. */
@@ -1380,6 +1399,17 @@ export interface operations {
             };
             /** @description Forbidden. Codes: not-allowed, cross-site. */
             403: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Not Acceptable. Codes: not-acceptable. */
+            406: {
                 headers: {
                     /** @description The id of this call in the history. */
                     "X-Request-Id"?: string;
