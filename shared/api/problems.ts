@@ -41,6 +41,7 @@ export const PROBLEMS = {
   'unrelated-frames': { status: 422, title: 'The two frames cannot be related without a position or an epoch' },
   'not-representable': { status: 422, title: 'The attitude does not exist in the representation asked for' },
   'invalid-convention': { status: 422, title: 'The convention contradicts itself' },
+  'impossible-inertia': { status: 422, title: 'No body can have this inertia matrix' },
   'too-many-requests': { status: 429, title: 'Too many requests in this minute' },
   'too-many-parallel': { status: 429, title: 'Too many requests at the same time' },
   'quota-exceeded': { status: 429, title: 'The attitudes of this month are used up' },

@@ -6,6 +6,8 @@ import { exportHistoryEndpoint, listHistoryEndpoint } from './history.ts';
 import { issueKeyEndpoint, listKeysEndpoint, revokeKeyEndpoint } from './keys.ts';
 import { identifyEndpoint } from './identify.ts';
 import { ratesEndpoint } from './rates.ts';
+import { resolveEndpoint } from './resolve.ts';
+import { rigidBodyEndpoint } from './rigid-body.ts';
 import { getRunEndpoint, getRunJUnitEndpoint, listRunsEndpoint, verifyEndpoint } from './runs.ts';
 import { currentSessionEndpoint, signInEndpoint, signOutEndpoint } from './sessions.ts';
 import { changeKeyLimitsEndpoint, changeLimitsEndpoint, listLimitsEndpoint, ownUsageEndpoint, usageByKeyEndpoint } from './usage.ts';
@@ -16,6 +18,8 @@ export const ENDPOINTS: readonly Endpoint[] = [
   ratesEndpoint,
   verifyEndpoint,
   identifyEndpoint,
+  resolveEndpoint,
+  rigidBodyEndpoint,
   listRunsEndpoint,
   getRunJUnitEndpoint,
   getRunEndpoint,

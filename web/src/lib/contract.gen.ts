@@ -92,6 +92,50 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/resolve": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /**
+         * Resolve vectors between reference and body axes, and their derivatives by the transport theorem
+         * @description Seen from the reference a vector changes by ω × v more than seen from the body. Up to 10,000 samples a call.
+         *
+         *     Roles: administrator, integrator, engineer.
+         */
+        post: operations["resolveVectors"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/rigid-body": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /**
+         * Forces and moments that a rigid body’s motion takes, in body axes
+         * @description Newton’s and Euler’s equations. An inertia matrix that no body can have is refused. Up to 10,000 states a call; each counts as an attitude.
+         *
+         *     Roles: administrator, integrator, engineer.
+         */
+        post: operations["computeRigidBody"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/runs": {
         parameters: {
             query?: never;
@@ -294,50 +338,6 @@ export interface paths {
          *     Roles: administrator, integrator, engineer (their own), reviewer.
          */
         get: operations["exportHistory"];
-        put?: never;
-        post?: never;
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
-    };
-    "/history/settings": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        /**
-         * What the history keeps, and for how long
-         * @description Roles: administrator, integrator, engineer (their own), reviewer.
-         */
-        get: operations["getHistorySettings"];
-        /**
-         * Change what the history keeps; in force on the next call
-         * @description Roles: administrator.
-         */
-        put: operations["changeHistorySettings"];
-        post?: never;
-        delete?: never;
-        options?: never;
-        head?: never;
-        patch?: never;
-        trace?: never;
-    };
-    "/history/{id}": {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        /**
-         * One API call, with its body where that is kept
-         * @description Roles: administrator, integrator, engineer (their own), reviewer.
-         */
-        get: operations["getHistoryEntry"];
         put?: never;
         post?: never;
         delete?: never;
@@ -835,52 +835,6 @@ export interface components {
             warnings: number;
             warningCodes: string[];
         };
-        HistoryRecord: {
-            /** @description The request id, as in the X-Request-Id header of the answer. */
-            id: string;
-            /**
-             * Format: date-time
-             * @example 2026-05-04T08:30:00.000Z
-             */
-            at: string;
-            key: {
-                id: string;
-                name: string;
-                prefix: string;
-            } | null;
-            person: {
-                id: string;
-                name: string;
-            } | null;
-            /** @description Of the caller at the time of the call; null where nobody was known. */
-            role: components["schemas"]["Role"] | null;
-            method: string;
-            route: string;
-            status: number;
-            /** @description The problem code of a refused call. */
-            code: string | null;
-            /** @description Of the run that the call made, if it made one. */
-            verdict: ("pass" | "fail") | null;
-            durationMs: number;
-            attitudes: number;
-            /** @description Attitudes that a warning was given for. */
-            warnings: number;
-            warningCodes: string[];
-            /** @description Of calls that compute; null for others. */
-            body: {
-                /** @description Of the body as it arrived, decompressed. */
-                sha256: string;
-                bytes: number;
-                /** @description The body; null where the workspace keeps none, or it has more than 65536 bytes. */
-                text: string | null;
-            } | null;
-        };
-        HistorySettings: {
-            /** @description Whether the bodies of calls that compute are kept, up to 65536 bytes each. Otherwise only their SHA-256 is. */
-            keepBodies: boolean;
-            /** @description Days after which calls are forgotten; null for never. Usage and runs stay. */
-            retentionDays: number | null;
-        };
         Identification: {
             /**
              * @description unique: one explanation, and no other fits the data within the noise. ambiguous: several do. none: nothing in the lattice does.
@@ -1128,6 +1082,148 @@ export interface components {
             warnings: components["schemas"]["Warning"][];
             engine: string;
         };
+        ResolveInput: {
+            attitude: components["schemas"]["Convention"];
+            /**
+             * @description The axes that the vectors are given in; they are resolved in the other ones.
+             * @enum {string}
+             */
+            from: "reference" | "body";
+            /** @description The form of the samples’ angular velocity; needed with derivatives. */
+            rate?: components["schemas"]["Rate"];
+            /** @description Either every sample has a derivative and a rate, or none. A derivative is how the vector changes as seen from the frame it is given in. */
+            samples: {
+                attitude: number[];
+                vector: number[];
+                derivative?: number[];
+                rate?: number[];
+            }[];
+        };
+        ResolveOutput: {
+            vectors: [
+                number,
+                number,
+                number
+            ][];
+            /** @description How each vector changes as seen from the frame it is resolved in. */
+            derivatives?: [
+                number,
+                number,
+                number
+            ][];
+            attitude: components["schemas"]["ConventionFacets"];
+            /** @enum {string} */
+            from: "reference" | "body";
+            /** @enum {string} */
+            to: "reference" | "body";
+            rate?: {
+                /** @enum {string} */
+                rate: "body" | "reference" | "euler" | "quaternion" | "dcm";
+                /** @enum {string} */
+                unit?: "deg/s" | "rad/s";
+                angles?: components["schemas"]["ConventionFacets"];
+            };
+            engine: string;
+        };
+        RigidBodyInput: {
+            mass: number;
+            /** @description Inertia matrix about the centre of mass in the same right-handed body axes, kg m²: moments on the diagonal, negative products beside it ([0][2] is −Ixz). */
+            inertia: [
+                [
+                    number,
+                    number,
+                    number
+                ],
+                [
+                    number,
+                    number,
+                    number
+                ],
+                [
+                    number,
+                    number,
+                    number
+                ]
+            ];
+            /** @description true: refuse the matrix unless Ixy = Iyz = 0. */
+            symmetricAircraft?: boolean;
+            states: {
+                /** @description m/s, of the centre of mass relative to an inertial frame. */
+                velocity: [
+                    number,
+                    number,
+                    number
+                ];
+                /** @description rad/s. */
+                angularVelocity: [
+                    number,
+                    number,
+                    number
+                ];
+                /** @description m/s²: derivatives of the components as they stand. */
+                velocityDerivative: [
+                    number,
+                    number,
+                    number
+                ];
+                /** @description rad/s². */
+                angularVelocityDerivative: [
+                    number,
+                    number,
+                    number
+                ];
+                /** @description N, to be compared with what the motion takes. */
+                force?: [
+                    number,
+                    number,
+                    number
+                ];
+                /** @description N m about the centre of mass, to be compared. */
+                moment?: [
+                    number,
+                    number,
+                    number
+                ];
+            }[];
+        };
+        RigidBodyOutput: {
+            /** @description N: m (v̇ + ω × v), the sum of all external forces, weight among them. */
+            forces: [
+                number,
+                number,
+                number
+            ][];
+            /** @description N m: I ω̇ + ω × I ω. */
+            moments: [
+                number,
+                number,
+                number
+            ][];
+            /** @description Given less computed, where a state gives a force or a moment. */
+            residuals?: {
+                force: [
+                    number,
+                    number,
+                    number
+                ] | null;
+                moment: [
+                    number,
+                    number,
+                    number
+                ] | null;
+            }[];
+            inertia: {
+                /** @description kg m², least first. */
+                principalMoments: [
+                    number,
+                    number,
+                    number
+                ];
+                symmetricAircraft: boolean;
+                statement: string;
+            };
+            engine: string;
+        };
         /** @enum {string} */
         Role: "administrator" | "integrator" | "engineer" | "reviewer";
         RoleLimits: {
@@ -1300,7 +1396,7 @@ export interface components {
             /** @description Names the call by its request id. */
             instance: string;
             /** @enum {string} */
-            code: "malformed-json" | "malformed-request" | "invalid-cursor" | "missing-key" | "invalid-key" | "revoked-key" | "expired-key" | "not-signed-in" | "wrong-credentials" | "not-allowed" | "cross-site" | "unknown-route" | "not-found" | "unknown-preset" | "unknown-interface" | "method-not-allowed" | "not-acceptable" | "conflict" | "already-revoked" | "body-too-large" | "batch-too-large" | "unsupported-media-type" | "unsupported-encoding" | "missing-facet" | "unknown-facet" | "invalid-facet" | "missing-field" | "unknown-field" | "invalid-field" | "count-mismatch" | "not-a-number" | "not-finite" | "zero-norm" | "not-a-rotation" | "improper-axes" | "unrelated-frames" | "not-representable" | "invalid-convention" | "too-many-requests" | "too-many-parallel" | "quota-exceeded" | "internal" | "cross-check-failed" | "not-recorded";
+            code: "malformed-json" | "malformed-request" | "invalid-cursor" | "missing-key" | "invalid-key" | "revoked-key" | "expired-key" | "not-signed-in" | "wrong-credentials" | "not-allowed" | "cross-site" | "unknown-route" | "not-found" | "unknown-preset" | "unknown-interface" | "method-not-allowed" | "not-acceptable" | "conflict" | "already-revoked" | "body-too-large" | "batch-too-large" | "unsupported-media-type" | "unsupported-encoding" | "missing-facet" | "unknown-facet" | "invalid-facet" | "missing-field" | "unknown-field" | "invalid-field" | "count-mismatch" | "not-a-number" | "not-finite" | "zero-norm" | "not-a-rotation" | "improper-axes" | "unrelated-frames" | "not-representable" | "invalid-convention" | "impossible-inertia" | "too-many-requests" | "too-many-parallel" | "quota-exceeded" | "internal" | "cross-check-failed" | "not-recorded";
             errors: {
                 /** @description JSON pointer into the body, or ?name for a query parameter. */
                 pointer: string;
@@ -1441,7 +1537,7 @@ export interface operations {
                     "application/problem+json": components["schemas"]["Problem"];
                 };
             };
-            /** @description Unprocessable Entity. Codes: unknown-preset, unknown-interface, missing-facet, unknown-facet, invalid-facet, missing-field, unknown-field, invalid-field, count-mismatch, not-a-number, not-finite, zero-norm, not-a-rotation, improper-axes, unrelated-frames, not-representable, invalid-convention. */
+            /** @description Unprocessable Entity. Codes: unknown-preset, unknown-interface, missing-facet, unknown-facet, invalid-facet, missing-field, unknown-field, invalid-field, count-mismatch, not-a-number, not-finite, zero-norm, not-a-rotation, improper-axes, unrelated-frames, not-representable, invalid-convention, impossible-inertia. */
             422: {
                 headers: {
                     /** @description The id of this call in the history. */
@@ -1595,7 +1691,7 @@ export interface operations {
                     "application/problem+json": components["schemas"]["Problem"];
                 };
             };
-            /** @description Unprocessable Entity. Codes: unknown-preset, unknown-interface, missing-facet, unknown-facet, invalid-facet, missing-field, unknown-field, invalid-field, count-mismatch, not-a-number, not-finite, zero-norm, not-a-rotation, improper-axes, unrelated-frames, not-representable, invalid-convention. */
+            /** @description Unprocessable Entity. Codes: unknown-preset, unknown-interface, missing-facet, unknown-facet, invalid-facet, missing-field, unknown-field, invalid-field, count-mismatch, not-a-number, not-finite, zero-norm, not-a-rotation, improper-axes, unrelated-frames, not-representable, invalid-convention, impossible-inertia. */
             422: {
                 headers: {
                     /** @description The id of this call in the history. */
@@ -1756,7 +1852,7 @@ export interface operations {
                     "application/problem+json": components["schemas"]["Problem"];
                 };
             };
-            /** @description Unprocessable Entity. Codes: unknown-preset, unknown-interface, missing-facet, unknown-facet, invalid-facet, missing-field, unknown-field, invalid-field, count-mismatch, not-a-number, not-finite, zero-norm, not-a-rotation, improper-axes, unrelated-frames, not-representable, invalid-convention. */
+            /** @description Unprocessable Entity. Codes: unknown-preset, unknown-interface, missing-facet, unknown-facet, invalid-facet, missing-field, unknown-field, invalid-field, count-mismatch, not-a-number, not-finite, zero-norm, not-a-rotation, improper-axes, unrelated-frames, not-representable, invalid-convention, impossible-inertia. */
             422: {
                 headers: {
                     /** @description The id of this call in the history. */
@@ -1948,7 +2044,339 @@ export interface operations {
                     "application/problem+json": components["schemas"]["Problem"];
                 };
             };
-            /** @description Unprocessable Entity. Codes: unknown-preset, unknown-interface, missing-facet, unknown-facet, invalid-facet, missing-field, unknown-field, invalid-field, count-mismatch, not-a-number, not-finite, zero-norm, not-a-rotation, improper-axes, unrelated-frames, not-representable, invalid-convention. */
+            /** @description Unprocessable Entity. Codes: unknown-preset, unknown-interface, missing-facet, unknown-facet, invalid-facet, missing-field, unknown-field, invalid-field, count-mismatch, not-a-number, not-finite, zero-norm, not-a-rotation, improper-axes, unrelated-frames, not-representable, invalid-convention, impossible-inertia. */
+            422: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Too Many Requests. Codes: too-many-requests, too-many-parallel, quota-exceeded. */
+            429: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Internal Server Error. Codes: internal, cross-check-failed. */
+            500: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Service Unavailable. Codes: not-recorded. */
+            503: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    resolveVectors: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                /**
+                 * @example {
+                 *       "attitude": {
+                 *         "preset": "aircraft-euler-deg"
+                 *       },
+                 *       "from": "body",
+                 *       "rate": {
+                 *         "rate": "body",
+                 *         "unit": "deg/s"
+                 *       },
+                 *       "samples": [
+                 *         {
+                 *           "attitude": [
+                 *             0,
+                 *             0,
+                 *             0
+                 *           ],
+                 *           "vector": [
+                 *             10,
+                 *             0,
+                 *             0
+                 *           ],
+                 *           "derivative": [
+                 *             1,
+                 *             0,
+                 *             0
+                 *           ],
+                 *           "rate": [
+                 *             0,
+                 *             0,
+                 *             90
+                 *           ]
+                 *         }
+                 *       ]
+                 *     }
+                 */
+                "application/json": components["schemas"]["ResolveInput"];
+            };
+        };
+        responses: {
+            /** @description OK */
+            200: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ResolveOutput"];
+                };
+            };
+            /** @description Bad Request. Codes: malformed-json, malformed-request, invalid-cursor. */
+            400: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Unauthorized. Codes: missing-key, invalid-key, revoked-key, expired-key, not-signed-in, wrong-credentials. */
+            401: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Forbidden. Codes: not-allowed, cross-site. */
+            403: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Payload Too Large. Codes: body-too-large, batch-too-large. */
+            413: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Unsupported Media Type. Codes: unsupported-media-type, unsupported-encoding. */
+            415: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Unprocessable Entity. Codes: unknown-preset, unknown-interface, missing-facet, unknown-facet, invalid-facet, missing-field, unknown-field, invalid-field, count-mismatch, not-a-number, not-finite, zero-norm, not-a-rotation, improper-axes, unrelated-frames, not-representable, invalid-convention, impossible-inertia. */
+            422: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Too Many Requests. Codes: too-many-requests, too-many-parallel, quota-exceeded. */
+            429: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Internal Server Error. Codes: internal, cross-check-failed. */
+            500: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Service Unavailable. Codes: not-recorded. */
+            503: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    computeRigidBody: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                /**
+                 * @example {
+                 *       "mass": 9300,
+                 *       "inertia": [
+                 *         [
+                 *           12875,
+                 *           0,
+                 *           -1331
+                 *         ],
+                 *         [
+                 *           0,
+                 *           75674,
+                 *           0
+                 *         ],
+                 *         [
+                 *           -1331,
+                 *           0,
+                 *           85552
+                 *         ]
+                 *       ],
+                 *       "states": [
+                 *         {
+                 *           "velocity": [
+                 *             120,
+                 *             3,
+                 *             9
+                 *           ],
+                 *           "angularVelocity": [
+                 *             0.31,
+                 *             -0.12,
+                 *             0.07
+                 *           ],
+                 *           "velocityDerivative": [
+                 *             0.4,
+                 *             -0.2,
+                 *             1.1
+                 *           ],
+                 *           "angularVelocityDerivative": [
+                 *             0.4,
+                 *             -0.05,
+                 *             0.02
+                 *           ]
+                 *         }
+                 *       ]
+                 *     }
+                 */
+                "application/json": components["schemas"]["RigidBodyInput"];
+            };
+        };
+        responses: {
+            /** @description OK */
+            200: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["RigidBodyOutput"];
+                };
+            };
+            /** @description Bad Request. Codes: malformed-json, malformed-request, invalid-cursor. */
+            400: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Unauthorized. Codes: missing-key, invalid-key, revoked-key, expired-key, not-signed-in, wrong-credentials. */
+            401: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Forbidden. Codes: not-allowed, cross-site. */
+            403: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Payload Too Large. Codes: body-too-large, batch-too-large. */
+            413: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Unsupported Media Type. Codes: unsupported-media-type, unsupported-encoding. */
+            415: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Unprocessable Entity. Codes: unknown-preset, unknown-interface, missing-facet, unknown-facet, invalid-facet, missing-field, unknown-field, invalid-field, count-mismatch, not-a-number, not-finite, zero-norm, not-a-rotation, improper-axes, unrelated-frames, not-representable, invalid-convention, impossible-inertia. */
             422: {
                 headers: {
                     /** @description The id of this call in the history. */
@@ -2058,7 +2486,7 @@ export interface operations {
                     "application/problem+json": components["schemas"]["Problem"];
                 };
             };
-            /** @description Unprocessable Entity. Codes: unknown-preset, unknown-interface, missing-facet, unknown-facet, invalid-facet, missing-field, unknown-field, invalid-field, count-mismatch, not-a-number, not-finite, zero-norm, not-a-rotation, improper-axes, unrelated-frames, not-representable, invalid-convention. */
+            /** @description Unprocessable Entity. Codes: unknown-preset, unknown-interface, missing-facet, unknown-facet, invalid-facet, missing-field, unknown-field, invalid-field, count-mismatch, not-a-number, not-finite, zero-norm, not-a-rotation, improper-axes, unrelated-frames, not-representable, invalid-convention, impossible-inertia. */
             422: {
                 headers: {
                     /** @description The id of this call in the history. */
@@ -2610,7 +3038,7 @@ export interface operations {
                     "application/problem+json": components["schemas"]["Problem"];
                 };
             };
-            /** @description Unprocessable Entity. Codes: unknown-preset, unknown-interface, missing-facet, unknown-facet, invalid-facet, missing-field, unknown-field, invalid-field, count-mismatch, not-a-number, not-finite, zero-norm, not-a-rotation, improper-axes, unrelated-frames, not-representable, invalid-convention. */
+            /** @description Unprocessable Entity. Codes: unknown-preset, unknown-interface, missing-facet, unknown-facet, invalid-facet, missing-field, unknown-field, invalid-field, count-mismatch, not-a-number, not-finite, zero-norm, not-a-rotation, improper-axes, unrelated-frames, not-representable, invalid-convention, impossible-inertia. */
             422: {
                 headers: {
                     /** @description The id of this call in the history. */
@@ -2851,7 +3279,7 @@ export interface operations {
                     "application/problem+json": components["schemas"]["Problem"];
                 };
             };
-            /** @description Unprocessable Entity. Codes: unknown-preset, unknown-interface, missing-facet, unknown-facet, invalid-facet, missing-field, unknown-field, invalid-field, count-mismatch, not-a-number, not-finite, zero-norm, not-a-rotation, improper-axes, unrelated-frames, not-representable, invalid-convention. */
+            /** @description Unprocessable Entity. Codes: unknown-preset, unknown-interface, missing-facet, unknown-facet, invalid-facet, missing-field, unknown-field, invalid-field, count-mismatch, not-a-number, not-finite, zero-norm, not-a-rotation, improper-axes, unrelated-frames, not-representable, invalid-convention, impossible-inertia. */
             422: {
                 headers: {
                     /** @description The id of this call in the history. */
@@ -2979,7 +3407,7 @@ export interface operations {
                     "application/problem+json": components["schemas"]["Problem"];
                 };
             };
-            /** @description Unprocessable Entity. Codes: unknown-preset, unknown-interface, missing-facet, unknown-facet, invalid-facet, missing-field, unknown-field, invalid-field, count-mismatch, not-a-number, not-finite, zero-norm, not-a-rotation, improper-axes, unrelated-frames, not-representable, invalid-convention. */
+            /** @description Unprocessable Entity. Codes: unknown-preset, unknown-interface, missing-facet, unknown-facet, invalid-facet, missing-field, unknown-field, invalid-field, count-mismatch, not-a-number, not-finite, zero-norm, not-a-rotation, improper-axes, unrelated-frames, not-representable, invalid-convention, impossible-inertia. */
             422: {
                 headers: {
                     /** @description The id of this call in the history. */
@@ -3084,306 +3512,8 @@ export interface operations {
                     "application/problem+json": components["schemas"]["Problem"];
                 };
             };
-            /** @description Unprocessable Entity. Codes: unknown-preset, unknown-interface, missing-facet, unknown-facet, invalid-facet, missing-field, unknown-field, invalid-field, count-mismatch, not-a-number, not-finite, zero-norm, not-a-rotation, improper-axes, unrelated-frames, not-representable, invalid-convention. */
+            /** @description Unprocessable Entity. Codes: unknown-preset, unknown-interface, missing-facet, unknown-facet, invalid-facet, missing-field, unknown-field, invalid-field, count-mismatch, not-a-number, not-finite, zero-norm, not-a-rotation, improper-axes, unrelated-frames, not-representable, invalid-convention, impossible-inertia. */
             422: {
-                headers: {
-                    /** @description The id of this call in the history. */
-                    "X-Request-Id"?: string;
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["Problem"];
-                };
-            };
-            /** @description Too Many Requests. Codes: too-many-requests, too-many-parallel, quota-exceeded. */
-            429: {
-                headers: {
-                    /** @description The id of this call in the history. */
-                    "X-Request-Id"?: string;
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["Problem"];
-                };
-            };
-            /** @description Internal Server Error. Codes: internal, cross-check-failed. */
-            500: {
-                headers: {
-                    /** @description The id of this call in the history. */
-                    "X-Request-Id"?: string;
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["Problem"];
-                };
-            };
-            /** @description Service Unavailable. Codes: not-recorded. */
-            503: {
-                headers: {
-                    /** @description The id of this call in the history. */
-                    "X-Request-Id"?: string;
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["Problem"];
-                };
-            };
-        };
-    };
-    getHistorySettings: {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            /** @description OK */
-            200: {
-                headers: {
-                    /** @description The id of this call in the history. */
-                    "X-Request-Id"?: string;
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["HistorySettings"];
-                };
-            };
-            /** @description Unauthorized. Codes: missing-key, invalid-key, revoked-key, expired-key, not-signed-in, wrong-credentials. */
-            401: {
-                headers: {
-                    /** @description The id of this call in the history. */
-                    "X-Request-Id"?: string;
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["Problem"];
-                };
-            };
-            /** @description Forbidden. Codes: not-allowed, cross-site. */
-            403: {
-                headers: {
-                    /** @description The id of this call in the history. */
-                    "X-Request-Id"?: string;
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["Problem"];
-                };
-            };
-            /** @description Too Many Requests. Codes: too-many-requests, too-many-parallel, quota-exceeded. */
-            429: {
-                headers: {
-                    /** @description The id of this call in the history. */
-                    "X-Request-Id"?: string;
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["Problem"];
-                };
-            };
-            /** @description Internal Server Error. Codes: internal, cross-check-failed. */
-            500: {
-                headers: {
-                    /** @description The id of this call in the history. */
-                    "X-Request-Id"?: string;
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["Problem"];
-                };
-            };
-            /** @description Service Unavailable. Codes: not-recorded. */
-            503: {
-                headers: {
-                    /** @description The id of this call in the history. */
-                    "X-Request-Id"?: string;
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["Problem"];
-                };
-            };
-        };
-    };
-    changeHistorySettings: {
-        parameters: {
-            query?: never;
-            header?: never;
-            path?: never;
-            cookie?: never;
-        };
-        requestBody: {
-            content: {
-                /**
-                 * @example {
-                 *       "keepBodies": true,
-                 *       "retentionDays": 365
-                 *     }
-                 */
-                "application/json": components["schemas"]["HistorySettings"];
-            };
-        };
-        responses: {
-            /** @description OK */
-            200: {
-                headers: {
-                    /** @description The id of this call in the history. */
-                    "X-Request-Id"?: string;
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["HistorySettings"];
-                };
-            };
-            /** @description Bad Request. Codes: malformed-json, malformed-request, invalid-cursor. */
-            400: {
-                headers: {
-                    /** @description The id of this call in the history. */
-                    "X-Request-Id"?: string;
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["Problem"];
-                };
-            };
-            /** @description Unauthorized. Codes: missing-key, invalid-key, revoked-key, expired-key, not-signed-in, wrong-credentials. */
-            401: {
-                headers: {
-                    /** @description The id of this call in the history. */
-                    "X-Request-Id"?: string;
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["Problem"];
-                };
-            };
-            /** @description Forbidden. Codes: not-allowed, cross-site. */
-            403: {
-                headers: {
-                    /** @description The id of this call in the history. */
-                    "X-Request-Id"?: string;
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["Problem"];
-                };
-            };
-            /** @description Payload Too Large. Codes: body-too-large, batch-too-large. */
-            413: {
-                headers: {
-                    /** @description The id of this call in the history. */
-                    "X-Request-Id"?: string;
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["Problem"];
-                };
-            };
-            /** @description Unsupported Media Type. Codes: unsupported-media-type, unsupported-encoding. */
-            415: {
-                headers: {
-                    /** @description The id of this call in the history. */
-                    "X-Request-Id"?: string;
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["Problem"];
-                };
-            };
-            /** @description Unprocessable Entity. Codes: unknown-preset, unknown-interface, missing-facet, unknown-facet, invalid-facet, missing-field, unknown-field, invalid-field, count-mismatch, not-a-number, not-finite, zero-norm, not-a-rotation, improper-axes, unrelated-frames, not-representable, invalid-convention. */
-            422: {
-                headers: {
-                    /** @description The id of this call in the history. */
-                    "X-Request-Id"?: string;
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["Problem"];
-                };
-            };
-            /** @description Too Many Requests. Codes: too-many-requests, too-many-parallel, quota-exceeded. */
-            429: {
-                headers: {
-                    /** @description The id of this call in the history. */
-                    "X-Request-Id"?: string;
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["Problem"];
-                };
-            };
-            /** @description Internal Server Error. Codes: internal, cross-check-failed. */
-            500: {
-                headers: {
-                    /** @description The id of this call in the history. */
-                    "X-Request-Id"?: string;
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["Problem"];
-                };
-            };
-            /** @description Service Unavailable. Codes: not-recorded. */
-            503: {
-                headers: {
-                    /** @description The id of this call in the history. */
-                    "X-Request-Id"?: string;
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["Problem"];
-                };
-            };
-        };
-    };
-    getHistoryEntry: {
-        parameters: {
-            query?: never;
-            header?: never;
-            path: {
-                id: string;
-            };
-            cookie?: never;
-        };
-        requestBody?: never;
-        responses: {
-            /** @description OK */
-            200: {
-                headers: {
-                    /** @description The id of this call in the history. */
-                    "X-Request-Id"?: string;
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/json": components["schemas"]["HistoryRecord"];
-                };
-            };
-            /** @description Unauthorized. Codes: missing-key, invalid-key, revoked-key, expired-key, not-signed-in, wrong-credentials. */
-            401: {
-                headers: {
-                    /** @description The id of this call in the history. */
-                    "X-Request-Id"?: string;
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["Problem"];
-                };
-            };
-            /** @description Forbidden. Codes: not-allowed, cross-site. */
-            403: {
-                headers: {
-                    /** @description The id of this call in the history. */
-                    "X-Request-Id"?: string;
-                    [name: string]: unknown;
-                };
-                content: {
-                    "application/problem+json": components["schemas"]["Problem"];
-                };
-            };
-            /** @description Not Found. Codes: unknown-route, not-found. */
-            404: {
                 headers: {
                     /** @description The id of this call in the history. */
                     "X-Request-Id"?: string;
@@ -3462,7 +3592,7 @@ export interface operations {
                     "application/problem+json": components["schemas"]["Problem"];
                 };
             };
-            /** @description Unprocessable Entity. Codes: unknown-preset, unknown-interface, missing-facet, unknown-facet, invalid-facet, missing-field, unknown-field, invalid-field, count-mismatch, not-a-number, not-finite, zero-norm, not-a-rotation, improper-axes, unrelated-frames, not-representable, invalid-convention. */
+            /** @description Unprocessable Entity. Codes: unknown-preset, unknown-interface, missing-facet, unknown-facet, invalid-facet, missing-field, unknown-field, invalid-field, count-mismatch, not-a-number, not-finite, zero-norm, not-a-rotation, improper-axes, unrelated-frames, not-representable, invalid-convention, impossible-inertia. */
             422: {
                 headers: {
                     /** @description The id of this call in the history. */
@@ -3553,7 +3683,7 @@ export interface operations {
                     "application/problem+json": components["schemas"]["Problem"];
                 };
             };
-            /** @description Unprocessable Entity. Codes: unknown-preset, unknown-interface, missing-facet, unknown-facet, invalid-facet, missing-field, unknown-field, invalid-field, count-mismatch, not-a-number, not-finite, zero-norm, not-a-rotation, improper-axes, unrelated-frames, not-representable, invalid-convention. */
+            /** @description Unprocessable Entity. Codes: unknown-preset, unknown-interface, missing-facet, unknown-facet, invalid-facet, missing-field, unknown-field, invalid-field, count-mismatch, not-a-number, not-finite, zero-norm, not-a-rotation, improper-axes, unrelated-frames, not-representable, invalid-convention, impossible-inertia. */
             422: {
                 headers: {
                     /** @description The id of this call in the history. */
@@ -3759,7 +3889,7 @@ export interface operations {
                     "application/problem+json": components["schemas"]["Problem"];
                 };
             };
-            /** @description Unprocessable Entity. Codes: unknown-preset, unknown-interface, missing-facet, unknown-facet, invalid-facet, missing-field, unknown-field, invalid-field, count-mismatch, not-a-number, not-finite, zero-norm, not-a-rotation, improper-axes, unrelated-frames, not-representable, invalid-convention. */
+            /** @description Unprocessable Entity. Codes: unknown-preset, unknown-interface, missing-facet, unknown-facet, invalid-facet, missing-field, unknown-field, invalid-field, count-mismatch, not-a-number, not-finite, zero-norm, not-a-rotation, improper-axes, unrelated-frames, not-representable, invalid-convention, impossible-inertia. */
             422: {
                 headers: {
                     /** @description The id of this call in the history. */
@@ -3884,7 +4014,7 @@ export interface operations {
                     "application/problem+json": components["schemas"]["Problem"];
                 };
             };
-            /** @description Unprocessable Entity. Codes: unknown-preset, unknown-interface, missing-facet, unknown-facet, invalid-facet, missing-field, unknown-field, invalid-field, count-mismatch, not-a-number, not-finite, zero-norm, not-a-rotation, improper-axes, unrelated-frames, not-representable, invalid-convention. */
+            /** @description Unprocessable Entity. Codes: unknown-preset, unknown-interface, missing-facet, unknown-facet, invalid-facet, missing-field, unknown-field, invalid-field, count-mismatch, not-a-number, not-finite, zero-norm, not-a-rotation, improper-axes, unrelated-frames, not-representable, invalid-convention, impossible-inertia. */
             422: {
                 headers: {
                     /** @description The id of this call in the history. */

@@ -1,10 +1,9 @@
 import fc from 'fast-check';
-import { create, all } from 'mathjs';
+import { add, cross, eigs, multiply } from 'mathjs';
 import { describe, expect, it } from 'vitest';
 import { inertiaFault, isSymmetricAircraft, principalMoments, type InertiaMatrix } from '#shared/attitude/rigid-body/inertia.ts';
 import { newtonEuler } from '#shared/attitude/rigid-body/newton-euler.ts';
 
-const math = create(all);
 const vector = fc.tuple(...[0, 1, 2].map(() => fc.integer({ min: -50, max: 50 }).map((n) => n / 7))) as fc.Arbitrary<[number, number, number]>;
 
 /** Of a few point masses: every inertia matrix that there is can be made so. */
@@ -17,9 +16,9 @@ describe('newtonEuler', () => {
   it('is what mathjs makes of m (v̇ + ω × v) and I ω̇ + ω × I ω', () => {
     fc.assert(fc.property(possible, vector, vector, vector, vector, (inertia, v, w, dv, dw) => {
       const { force, moment } = newtonEuler(3.5, inertia, { velocity: v, angularVelocity: w, velocityDerivative: dv, angularVelocityDerivative: dw });
-      const F = math.multiply(3.5, math.add(dv, math.cross(w, v) as number[])) as unknown as number[];
+      const F = multiply(3.5, add(dv, cross(w, v) as number[])) as unknown as number[];
       const I = inertia.map((row) => [...row]);
-      const M = math.add(math.multiply(I, dw), math.cross(w, math.multiply(I, w)) as number[]) as unknown as number[];
+      const M = add(multiply(I, dw), cross(w, multiply(I, w)) as number[]) as unknown as number[];
       for (let k = 0; k < 3; k++) {
         expect(force[k]).toBeCloseTo(F[k]!, 8);
         expect(Math.abs(moment[k]! - M[k]!)).toBeLessThan(1e-9 * (1 + Math.abs(M[k]!)) * 1e3);
@@ -67,7 +66,7 @@ describe('inertiaFault', () => {
 
   it('finds principal moments as mathjs does', () => {
     fc.assert(fc.property(possible, (inertia) => {
-      const values = (math.eigs(inertia.map((row) => [...row])).values as number[]).map(Number).sort((a, b) => a - b);
+      const values = (eigs(inertia.map((row) => [...row])).values as number[]).map(Number).sort((a, b) => a - b);
       principalMoments(inertia).forEach((moment, k) => expect(Math.abs(moment - values[k]!)).toBeLessThan(1e-9 * values[2]!));
     }));
   });
