@@ -3,8 +3,6 @@ import type { AddressInfo } from 'node:net';
 import { ConfigError, readConfig, type Config } from './config.ts';
 import { createPerson } from './domain/people/create-person.ts';
 import { createApp } from './http/app.ts';
-import { pruneHistory } from './jobs/prune-history.ts';
-import { startJobs } from './jobs/schedule.ts';
 import { createLogger } from './logger.ts';
 import { createServices, type Services } from './services.ts';
 
@@ -41,10 +39,9 @@ if (demo) {
   await ensureAdministrator(services);
 }
 
-const HOUR = 3_600_000;
-const jobs = startJobs([{ name: 'prune-history', everyMs: HOUR, run: () => pruneHistory(services) }], logger);
-
-const server = createServer(createApp(services));
+/** A stream may take as long as this to arrive; one that stalls is given up long before. */
+const LONGEST_REQUEST_MS = 3_600_000;
+const server = createServer({ requestTimeout: LONGEST_REQUEST_MS }, createApp(services));
 server.listen(config.port, config.host, async () => {
   const { port } = server.address() as AddressInfo;
   const url = config.port === 0 ? `http://${config.host}:${port}` : config.publicUrl.origin;
@@ -62,7 +59,6 @@ function stop(signal: string): void {
   stopping = true;
   logger.info({ signal }, 'stopping');
   server.close(async () => {
-    await jobs.stop();
     await services.close();
     logger.info('stopped');
     process.exit(0);

@@ -1,6 +1,7 @@
 import type { AttitudeWarning } from '#shared/attitude/warnings.ts';
 import { WorkerThread } from '../threads/worker-thread.ts';
 import type { Batch, ConvertedBatch, WantsCrossCheck } from './batch.ts';
+import { whollyOwned } from './owned.ts';
 import type { ConvertedPart, StreamOpening } from './streamed-conversion.ts';
 
 export type BatchRequest =
@@ -17,23 +18,30 @@ export interface OpenStream {
   close(): Promise<readonly AttitudeWarning[]>;
 }
 
+const WORKER = 'dist/server/batch-worker.js';
+/** Streams hold a part each and little else; with the engine's usual allowance what they leave behind would pile up first. */
+const STREAM_MEMORY = { maxYoungGenerationSizeMb: 3, maxOldGenerationSizeMb: 64 };
+
 /**
- * Long batches and streams, parsed, converted and written in a thread of their own, so that the service goes on
- * answering meanwhile. Streams take turns part by part.
+ * Long batches and streams, parsed, converted and written in threads of their own, one for each kind, so that the
+ * service goes on answering meanwhile. Streams take turns part by part, and never wait for a batch.
  */
 export class BatchThread {
-  readonly #thread = new WorkerThread<BatchRequest, BatchReply>('dist/server/batch-worker.js');
+  readonly #batches = new WorkerThread<BatchRequest, BatchReply>(WORKER);
+  readonly #streams = new WorkerThread<BatchRequest, BatchReply>(WORKER, STREAM_MEMORY);
 
-  convert = (batch: Batch): Promise<ConvertedBatch | WantsCrossCheck> => this.#thread.ask({ kind: 'batch', batch }) as Promise<ConvertedBatch | WantsCrossCheck>;
+  convert = (batch: Batch): Promise<ConvertedBatch | WantsCrossCheck> => this.#batches.ask({ kind: 'batch', batch }, whollyOwned(batch.body)) as Promise<ConvertedBatch | WantsCrossCheck>;
 
   /** @throws AttitudeError where the two conventions cannot be converted into one another. */
   async open(stream: string, opening: StreamOpening): Promise<OpenStream> {
-    await this.#thread.ask({ kind: 'open', stream, opening });
+    await this.#streams.ask({ kind: 'open', stream, opening });
     return {
-      part: (bytes, last, whole) => this.#thread.ask({ kind: 'part', stream, bytes, last, whole }) as Promise<ConvertedPart>,
-      close: async () => (await this.#thread.ask({ kind: 'close', stream }) as { warnings: AttitudeWarning[] }).warnings,
+      part: (bytes, last, whole) => this.#streams.ask({ kind: 'part', stream, bytes, last, whole }, whollyOwned(bytes)) as Promise<ConvertedPart>,
+      close: async () => (await this.#streams.ask({ kind: 'close', stream }) as { warnings: AttitudeWarning[] }).warnings,
     };
   }
 
-  close = (): Promise<void> => this.#thread.close();
+  async close(): Promise<void> {
+    await Promise.all([this.#batches.close(), this.#streams.close()]);
+  }
 }

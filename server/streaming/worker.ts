@@ -1,6 +1,7 @@
 import { serveThread } from '../threads/serve.ts';
 import type { BatchReply, BatchRequest } from './batch-thread.ts';
 import { convertBatch } from './batch.ts';
+import { whollyOwned } from './owned.ts';
 import { StreamedConversion } from './streamed-conversion.ts';
 
 const streams = new Map<string, StreamedConversion>();
@@ -19,4 +20,4 @@ serveThread(async (request: BatchRequest): Promise<BatchReply> => {
       return { warnings };
     }
   }
-});
+}, (reply) => (reply && 'output' in reply ? whollyOwned(reply.output) : []));

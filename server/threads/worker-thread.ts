@@ -1,4 +1,4 @@
-import { Worker } from 'node:worker_threads';
+import { Worker, type ResourceLimits } from 'node:worker_threads';
 import { projectFile } from '../project-file.ts';
 import { WorkerFailure, type Failure } from './failure.ts';
 
@@ -12,21 +12,24 @@ export type Reply<Result> = { readonly id: number } & ({ readonly result: Result
 /** Work that would hold up the service, done in a thread of its own, started at the first request. */
 export class WorkerThread<Request, Result> {
   readonly #file: string;
+  readonly #limits: ResourceLimits;
   #worker: Worker | null = null;
   #next = 1;
   readonly #waiting = new Map<number, Waiting<Result>>();
 
   /** @param file - what npm run build:server makes of the thread, also where the rest runs from source. */
-  constructor(file: string) {
+  constructor(file: string, limits: ResourceLimits = {}) {
     this.#file = file;
+    this.#limits = limits;
   }
 
-  ask(request: Request): Promise<Result> {
+  /** @param given - Buffers that the request holds and the caller gives away: they move instead of being copied. */
+  ask(request: Request, given: readonly ArrayBuffer[] = []): Promise<Result> {
     const worker = (this.#worker ??= this.#start());
     return new Promise((resolve, reject) => {
       const id = this.#next++;
       this.#waiting.set(id, { resolve, reject });
-      worker.postMessage({ id, request });
+      worker.postMessage({ id, request }, given);
     });
   }
 
@@ -36,7 +39,7 @@ export class WorkerThread<Request, Result> {
   }
 
   #start(): Worker {
-    const worker = new Worker(projectFile(this.#file));
+    const worker = new Worker(projectFile(this.#file), { resourceLimits: this.#limits });
     worker.unref();
     worker.on('message', (reply: Reply<Result>) => {
       const waiting = this.#waiting.get(reply.id);

@@ -1,6 +1,7 @@
 import { z } from 'zod';
 import { role, timestamp } from './common.ts';
 import { endpoint } from './endpoint.ts';
+import { ATTITUDES_PER_CALL } from './limits.ts';
 
 const whole = (least: number, most: number) => z.int({ error: `must be a whole number from ${least} to ${most}` }).min(least, { error: `must be a whole number from ${least} to ${most}` }).max(most, { error: `must be a whole number from ${least} to ${most}` });
 
@@ -8,7 +9,7 @@ const whole = (least: number, most: number) => z.int({ error: `must be a whole n
 export const limits = z.strictObject({
   requestsPerMinute: whole(1, 1_000_000),
   attitudesPerMonth: whole(0, 1_000_000_000_000),
-  attitudesPerCall: whole(1, 10_000).meta({ description: 'Attitudes of one JSON call.' }),
+  attitudesPerCall: whole(1, ATTITUDES_PER_CALL).meta({ description: 'Attitudes of one call with JSON on either side. What is streamed from rows to rows is bounded by the month alone.' }),
   parallelRequests: whole(1, 1_000),
 }).meta({ id: 'Limits', description: 'What one key, or one person signed in, may use.' });
 

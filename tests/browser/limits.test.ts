@@ -21,7 +21,7 @@ it('an administrator tightens a role, and the next call of its keys is held to t
   const perCall = page.getByLabel('Attitudes a call');
   await perCall.fill('none');
   await page.getByRole('button', { name: 'Change limits' }).click();
-  await page.getByText('A whole number from 1 to 10000.').waitFor();
+  await page.getByText('A whole number from 1 to 100000.').waitFor();
   await perCall.fill('1');
   await page.getByRole('button', { name: 'Change limits' }).click();
   await page.getByRole('dialog').waitFor({ state: 'detached' });

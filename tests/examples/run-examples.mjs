@@ -44,6 +44,11 @@ async function convertTheRecording() {
   check('both wrote every row, with its time', [byCurl, byNode].every((made) => made.rows.length === rows.length && made.rows.every((row, i) => row.length === 4 && row[0] === rows[i][0])), byCurl.rows.length);
   check('both wrote the same numbers', byCurl.rows.every((row, i) => row.every((cell, k) => Object.is(Number(cell), Number(byNode.rows[i][k])))), '');
 
+  const stream = await run('bash', ['examples/convert-stream.sh', at('flight.csv'), at('by-stream.csv')]);
+  const streamed = stream.status === 0 ? read('by-stream.csv') : { names: [], rows: [] };
+  check('the streaming script converts it in one call', stream.stdout.startsWith(`${rows.length} attitudes converted`), stream.stdout + stream.stderr);
+  check('it wrote every row with the angles recorded, bit for bit', streamed.rows.length === rows.length && streamed.rows.every((row, i) => row[0] === rows[i][0] && ['yaw_deg', 'pitch_deg', 'roll_deg'].every((name, k) => Number(row[k + 1]) === Number(rows[i][names.indexOf(name)]))), streamed.rows.length);
+
   // The recorded angles were computed by the shared core in this process's own engine: the service must agree to the last bit,
   // heading counted from 0 to 360.
   const column = (name) => names.indexOf(name);

@@ -3,6 +3,7 @@ import { resolveConvention } from '#server/domain/conventions/resolve-convention
 import { DomainError } from '#server/domain/errors.ts';
 import { QuotaMeter } from '#server/domain/meter.ts';
 import type { Services } from '#server/services.ts';
+import type { ConvertedPart } from '#server/streaming/streamed-conversion.ts';
 import { encoderOf, type Format } from '#server/streaming/formats.ts';
 import type { Call } from '../call.ts';
 import { HttpProblem } from '../problems.ts';
@@ -11,8 +12,12 @@ import { contentTypeOf } from './negotiate.ts';
 import { readQuery } from './query.ts';
 import { StreamedAnswer } from './streamed-answer.ts';
 
-/** Bytes that are converted at a time, and answered whole or not at all when they are the first. */
-const PART_BYTES = 1024 * 1024;
+/** Bytes at the beginning that are answered whole or not at all. */
+const FIRST_PART_BYTES = 1024 * 1024;
+/** Bytes that are converted at a time after that. */
+const PART_BYTES = 256 * 1024;
+/** Converted bytes that wait at most while those before them are on their way. */
+const GATHERED_BYTES = 512 * 1024;
 /** A connection on which nothing moves for so long is given up. */
 const STALLED_MS = 60_000;
 
@@ -29,15 +34,15 @@ export async function answerStream(services: Services, call: Call, route: string
   const answer = new StreamedAnswer(services, call, meter, route, encoderOf(output, to), contentTypeOf(output));
   response.setTimeout(STALLED_MS, () => request.socket.destroy());
   let sending: Promise<void> = Promise.resolve();
+  let idle = true;
+  let waiting: ConvertedPart | null = null;
   let first = true;
   let complete = false;
   let warnings = null;
   try {
-    // One part is converted while the one before it is recorded and sent.
-    for await (const { bytes, last } of bodyParts(request, PART_BYTES)) {
+    // Parts are converted while those before them are recorded and sent; what gathers meanwhile is recorded as one.
+    for await (const { bytes, last } of bodyParts(request, FIRST_PART_BYTES, PART_BYTES)) {
       const part = await stream.part(bytes, last, first);
-      await sending;
-      if (answer.refusal) break;
       if (first && part.refusal) throw new DomainError(part.refusal.code, part.refusal.message, part.refusal.items);
       if (first && last) {
         warnings = await stream.close();
@@ -46,9 +51,16 @@ export async function answerStream(services: Services, call: Call, route: string
         break;
       }
       first = false;
-      sending = answer.part(part);
+      waiting = waiting ? joined(waiting, part) : part;
+      const ends = last || part.refusal !== null;
+      if (!idle && !ends && waiting.output.length < GATHERED_BYTES) continue;
+      await sending;
+      if (answer.refusal) break;
+      idle = false;
+      sending = answer.part(waiting).finally(() => { idle = true; });
       sending.catch(() => undefined);
-      if (part.refusal) break;
+      waiting = null;
+      if (ends) break;
     }
     await sending;
   } catch (error) {
@@ -65,3 +77,5 @@ export async function answerStream(services: Services, call: Call, route: string
   }
   if (!complete) await answer.end(warnings).catch((error: unknown) => answer.breakOff(error));
 }
+
+const joined = (a: ConvertedPart, b: ConvertedPart): ConvertedPart => ({ output: Buffer.concat([a.output, b.output]), attitudes: a.attitudes + b.attitudes, refusal: b.refusal });

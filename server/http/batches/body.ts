@@ -19,15 +19,16 @@ const LINGER_MS = 2_000;
 type Unpacker = Readable & NodeJS.WritableStream & { readonly bytesWritten: number };
 
 /**
- * The body, decompressed, in parts of at least `size` bytes but for the last. Nothing is read ahead of who takes the parts.
+ * The body, decompressed, in parts of at least `first` bytes, later `then`, but for the last. Nothing is read ahead of who takes the parts.
  * @throws HttpProblem `unsupported-encoding`, `body-too-large` for what unpacks out of all proportion, `malformed-request`; BrokenOffError.
  */
-export async function* bodyParts(request: IncomingMessage, size: number): AsyncGenerator<{ bytes: Uint8Array; last: boolean }> {
+export async function* bodyParts(request: IncomingMessage, first: number, then = first): AsyncGenerator<{ bytes: Uint8Array; last: boolean }> {
   const unpacker = unpackerOf(request);
   const source: Readable = unpacker ? piped(request, unpacker) : request;
   let chunks: Buffer[] = [];
   let gathered = 0;
   let total = 0;
+  let size = first;
   let held: Buffer | null = null;
   try {
     for await (const chunk of source.iterator({ destroyOnReturn: false }) as AsyncIterable<Buffer>) {
@@ -41,6 +42,7 @@ export async function* bodyParts(request: IncomingMessage, size: number): AsyncG
       }
       if (gathered < size) continue;
       held = Buffer.concat(chunks);
+      size = then;
       chunks = [];
       gathered = 0;
     }

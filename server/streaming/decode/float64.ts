@@ -10,10 +10,12 @@ export function float64Decoder(width: number): Decoder {
   const rowBytes = width * DOUBLE;
   let rest = new Uint8Array(0);
   let rows = 0;
+  // Made once and used for every part: memory made anew for each would pile up between collections.
+  let part = new Uint8Array(0);
   return {
     decode(bytes, last) {
       const whole = Math.floor((rest.length + bytes.length) / rowBytes) * rowBytes;
-      const part = new Uint8Array(whole);
+      if (part.length < whole) part = new Uint8Array(whole);
       if (whole === 0) {
         rest = joined(rest, bytes);
       } else {
@@ -22,12 +24,12 @@ export function float64Decoder(width: number): Decoder {
         part.set(bytes.subarray(0, whole - rest.length), rest.length);
         rest = bytes.slice(whole - rest.length);
       }
-      if (!LITTLE) Buffer.from(part.buffer).swap64();
+      if (!LITTLE) Buffer.from(part.buffer, 0, whole).swap64();
       rows += whole / rowBytes;
       const refusal = last && rest.length > 0
         ? rowRefusal('count-mismatch', rows, `ends after ${rest.length} of its ${rowBytes} bytes; an attitude is ${width} doubles`)
         : null;
-      return { numbers: new Float64Array(part.buffer), refusal };
+      return { numbers: new Float64Array(part.buffer, 0, whole / DOUBLE), refusal };
     },
   };
 }

@@ -23,6 +23,7 @@ export function lineDecoder(width: number, read: ReadLine, headerLines = 0): Dec
   let rest = '';
   let lines = 0;
   let rows = 0;
+  let numbers = new Float64Array(1024);
   return {
     decode(bytes, last) {
       let all: string;
@@ -31,7 +32,6 @@ export function lineDecoder(width: number, read: ReadLine, headerLines = 0): Dec
       } catch {
         return { numbers: new Float64Array(0), refusal: rowRefusal('malformed-request', rows, 'or one soon after it is not valid UTF-8') };
       }
-      let numbers = new Float64Array(Math.max(64, Math.ceil(all.length / 8)));
       let used = 0;
       let start = 0;
       let refusal: Refusal | null = null;
@@ -56,7 +56,7 @@ export function lineDecoder(width: number, read: ReadLine, headerLines = 0): Dec
       }
       rest = all.slice(start);
       if (!refusal && rest.length > LONGEST_LINE) refusal = rowRefusal(tooLong.code, rows, tooLong.message, { where: `, line ${lines + 1},` });
-      return { numbers: numbers.slice(0, used), refusal };
+      return { numbers: numbers.subarray(0, used), refusal };
     },
   };
 }

@@ -17,9 +17,9 @@ export async function listen(service: TestService) {
   const { port } = server.address() as AddressInfo;
   return {
     port,
-    open: (path: string, headers: http.OutgoingHttpHeaders) => http.request({ port, host: '127.0.0.1', path, method: 'POST', headers }),
+    open: (path: string, headers: http.OutgoingHttpHeaders) => http.request({ port, host: '127.0.0.1', path, method: 'POST', headers, agent: false }),
     post(path: string, headers: http.OutgoingHttpHeaders, body: Uint8Array | string): Promise<Answer> {
-      const request = http.request({ port, host: '127.0.0.1', path, method: 'POST', headers });
+      const request = http.request({ port, host: '127.0.0.1', path, method: 'POST', headers, agent: false });
       const answer = answerOf(request);
       request.end(body);
       return answer;

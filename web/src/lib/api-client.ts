@@ -2,7 +2,7 @@ import createClient from 'openapi-fetch';
 import { ApiError, UnreachableError, type Problem } from './api-error.ts';
 import type { paths } from './contract.gen.ts';
 
-const client = createClient<paths>({ baseUrl: '/api/v1', credentials: 'same-origin' });
+const client = createClient<paths, 'application/json'>({ baseUrl: '/api/v1', credentials: 'same-origin' });
 
 client.use({
   async onResponse({ response }) {

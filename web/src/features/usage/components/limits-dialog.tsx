@@ -10,7 +10,7 @@ import { useChangeLimits, type Limits, type RoleLimits } from '../api/usage.ts';
 /** Names and bounds as the contract has them. */
 const FIELDS: readonly (readonly [keyof Limits, string, number, number])[] = [
   ['requestsPerMinute', 'Requests a minute', 1, 1_000_000], ['attitudesPerMonth', 'Attitudes a month', 0, 1_000_000_000_000],
-  ['attitudesPerCall', 'Attitudes a call', 1, 10_000], ['parallelRequests', 'Requests at once', 1, 1_000],
+  ['attitudesPerCall', 'Attitudes a call', 1, 100_000], ['parallelRequests', 'Requests at once', 1, 1_000],
 ];
 const POINTERS = Object.fromEntries(FIELDS.map(([name]) => [`/${name}`, name])) as Record<string, keyof Limits>;
 
