@@ -3,6 +3,8 @@ import type { AddressInfo } from 'node:net';
 import { ConfigError, readConfig, type Config } from './config.ts';
 import { createPerson } from './domain/people/create-person.ts';
 import { createApp } from './http/app.ts';
+import { pruneHistory } from './jobs/prune-history.ts';
+import { startJobs } from './jobs/schedule.ts';
 import { createLogger } from './logger.ts';
 import { createServices, type Services } from './services.ts';
 
@@ -39,6 +41,9 @@ if (demo) {
   await ensureAdministrator(services);
 }
 
+const HOUR = 3_600_000;
+const jobs = startJobs([{ name: 'prune-history', everyMs: HOUR, run: () => pruneHistory(services) }], logger);
+
 /** A stream may take as long as this to arrive; one that stalls is given up long before. */
 const LONGEST_REQUEST_MS = 3_600_000;
 const server = createServer({ requestTimeout: LONGEST_REQUEST_MS }, createApp(services));
@@ -59,6 +64,7 @@ function stop(signal: string): void {
   stopping = true;
   logger.info({ signal }, 'stopping');
   server.close(async () => {
+    await jobs.stop();
     await services.close();
     logger.info('stopped');
     process.exit(0);

@@ -5,6 +5,7 @@ import type { Config } from './config.ts';
 import { CrossChecker } from './cross-check/cross-checker.ts';
 import { connect, disconnect, type Database } from './db/database.ts';
 import { apiKeysRepository } from './db/repositories/api-keys.ts';
+import { historySettingsRepository } from './db/repositories/history-settings.ts';
 import { limitsRepository } from './db/repositories/limits.ts';
 import { runsRepository } from './db/repositories/runs.ts';
 import { streamedCallsRepository } from './db/repositories/streamed-calls.ts';
@@ -13,6 +14,7 @@ import { historyRepository } from './db/repositories/history.ts';
 import { peopleRepository } from './db/repositories/people.ts';
 import { sessionsRepository } from './db/repositories/sessions.ts';
 import type { Clock } from './domain/clock.ts';
+import { HistorySettings } from './domain/history/history-settings.ts';
 import { KeyRing } from './domain/keys/key-ring.ts';
 import { LimitTable } from './domain/limits/limit-table.ts';
 import { ParallelCalls } from './domain/limits/parallel-calls.ts';
@@ -43,6 +45,7 @@ export async function createServices({ config, logger, clock = Date.now }: Servi
     people: peopleRepository(database),
     sessions: sessionsRepository(database),
     history: historyRepository(database),
+    historySettings: await HistorySettings.load(historySettingsRepository(database)),
     usage,
     runs: runsRepository(database),
     streamedCalls: streamedCallsRepository(database),

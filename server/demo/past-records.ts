@@ -13,7 +13,7 @@ export function pastRecords(now: number, keyByName: ReadonlyMap<string, ApiKeyRo
   const flight = new RecordedLegs();
   const calls = pastCalls(now, flight).map(({ key, warningCodes, ...call }): NewRecord => {
     const row = key === null ? undefined : keyByName.get(key);
-    return { request: { ...call, requestId: randomUUID(), keyId: row?.id ?? null, personId: null, ownerId: row?.ownerId ?? null, role: row?.role ?? null, warningCodes: warningCodes.join(','), verdict: null }, run: null };
+    return { request: { ...call, requestId: randomUUID(), keyId: row?.id ?? null, personId: null, ownerId: row?.ownerId ?? null, role: row?.role ?? null, warningCodes: warningCodes.join(','), verdict: null, bodySha256: null, bodyBytes: null }, run: null };
   });
   const runs = pastRuns(now, flight).map((run) => recordOf(run, keyByName.get(run.key)!));
   return [...calls, ...runs].sort((a, b) => a.request.at - b.request.at);
@@ -29,7 +29,7 @@ function recordOf(run: PastRun, key: ApiKeyRow): NewRecord {
     engine: ENGINE,
   };
   return {
-    request: { requestId, at: run.at, keyId: key.id, personId: null, ownerId: key.ownerId, role: key.role, method: 'POST', route: '/api/v1/verify', status: 200, code: null, durationUs: run.durationUs, attitudes: run.count, warnings: 0, warningCodes: '', verdict: run.verdict },
+    request: { requestId, at: run.at, keyId: key.id, personId: null, ownerId: key.ownerId, role: key.role, method: 'POST', route: '/api/v1/verify', status: 200, code: null, durationUs: run.durationUs, attitudes: run.count, warnings: 0, warningCodes: '', verdict: run.verdict, bodySha256: null, bodyBytes: null },
     run: { id: randomUUID(), at: run.at, requestId, keyId: key.id, personId: null, ownerId: key.ownerId, label: run.label, commitId: run.commit, verdict: run.verdict, count: run.count, failed: run.failed, detail: JSON.stringify(detail) },
   };
 }

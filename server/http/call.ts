@@ -17,11 +17,15 @@ export interface Call {
   person: PersonDocument | null;
   /** The verification that this call made, stored with its record. */
   run: VerifiedRun | null;
+  /** The JSON body as it arrived, decompressed. */
+  body: Buffer | null;
+  /** Whether the history may hold the body: only where a body never carries a secret. */
+  bodyMayBeKept: boolean;
 }
 
 /** Opens a call and names it in the answer's headers. */
 export function openCall(request: Request, response: Response, now: number): Call {
   const id = randomUUID();
   response.setHeader('X-Request-Id', id);
-  return { id, request, response, startedAt: now, startedNs: process.hrtime.bigint(), meter: new NoMeter(), caller: null, person: null, run: null };
+  return { id, request, response, startedAt: now, startedNs: process.hrtime.bigint(), meter: new NoMeter(), caller: null, person: null, run: null, body: null, bodyMayBeKept: false };
 }

@@ -10,7 +10,7 @@ import { authenticate } from './authenticate.ts';
 import { openCall, type Call } from './call.ts';
 import { explainIssues } from './explain-issues.ts';
 import { problemOf, sendProblem } from './problems.ts';
-import { readJson } from './read-body.ts';
+import { bytesOf, readJson } from './read-body.ts';
 import { record } from './record.ts';
 import { isStream, sendStream } from './send-stream.ts';
 
@@ -84,7 +84,10 @@ async function parseInput(endpoint: Endpoint, call: Call) {
   const { request, response, caller, meter } = call;
   const params = parse(endpoint.params, request.params, 'path');
   const query = parse(endpoint.query, { ...request.query }, 'query');
-  const body = endpoint.body ? parse(endpoint.body, await readJson(request, response), 'body') : undefined;
+  // Computing calls carry numbers and conventions; what other calls carry may be a password.
+  call.bodyMayBeKept = endpoint.permission === 'attitude.compute';
+  const json = endpoint.body ? await readJson(request, response).finally(() => { call.body = bytesOf(request); }) : undefined;
+  const body = parse(endpoint.body, json, 'body');
   return { params, query, body, caller, meter, call };
 }
 

@@ -1,14 +1,21 @@
 import { isUtf8 } from 'node:buffer';
+import type { IncomingMessage } from 'node:http';
 import express, { type Request, type Response } from 'express';
 import { JSON_BODY_BYTES } from '#shared/api/limits.ts';
 import { HttpProblem } from './problems.ts';
+
+/** The bytes that a request's JSON was parsed from. */
+const bodies = new WeakMap<IncomingMessage, Buffer>();
+
+export const bytesOf = (request: IncomingMessage): Buffer | null => bodies.get(request) ?? null;
 
 const parseJson = express.json({
   limit: JSON_BODY_BYTES,
   strict: false,
   type: () => true,
-  verify: (_request, _response, bytes) => {
+  verify: (request, _response, bytes) => {
     if (!isUtf8(bytes)) throw new HttpProblem('malformed-json', 'The body is not valid UTF-8.');
+    bodies.set(request, bytes);
   },
 });
 

@@ -1,10 +1,12 @@
+import { keptBody } from '#server/domain/history/kept-body.ts';
 import type { Services } from '../services.ts';
 import type { Call } from './call.ts';
 
 /** Writes the call into the history and resolves once that is committed: only then may its answer leave. */
-export function record({ history }: Services, call: Call, route: string, status: number, code: string | null): Promise<void> {
+export function record({ history, historySettings }: Services, call: Call, route: string, status: number, code: string | null): Promise<void> {
   const { caller, meter } = call;
   const refused = status >= 400;
+  const body = call.body && call.bodyMayBeKept ? keptBody(call.body, historySettings.current.keepBodies) : null;
   const row = {
     requestId: call.id,
     at: call.startedAt,
@@ -21,8 +23,11 @@ export function record({ history }: Services, call: Call, route: string, status:
     warnings: refused ? 0 : meter.warnings,
     warningCodes: refused ? '' : meter.warningCodes.join(','),
     verdict: refused ? null : call.run?.verdict ?? null,
+    bodySha256: body?.sha256 ?? null,
+    bodyBytes: body?.bytes ?? null,
   };
-  return history.append(row, refused || !call.run ? null : {
+  const run = refused || !call.run ? null : {
     ...call.run, detail: JSON.stringify(call.run.detail), at: row.at, requestId: row.requestId, keyId: row.keyId, personId: row.personId, ownerId: row.ownerId!,
-  });
+  };
+  return history.append({ request: row, run, body: body?.text ?? null });
 }

@@ -2,6 +2,7 @@ import { z } from 'zod';
 import { warning } from './attitude.ts';
 import { pageQuery, role, timestamp } from './common.ts';
 import { endpoint } from './endpoint.ts';
+import { KEPT_BODY_BYTES } from './limits.ts';
 
 const verdict = z.enum(['pass', 'fail']);
 
@@ -56,6 +57,38 @@ export const exportHistoryEndpoint = endpoint({
   auth: 'caller', permission: 'history.read', query: historyFilterQuery, status: 200, response: z.string(), contentType: 'text/csv', problems: [401, 403, 422, 429, 503],
 });
 
+export const historyRecord = z.strictObject({
+  ...historyEntry.shape,
+  body: z.strictObject({
+    sha256: z.string().meta({ description: 'Of the body as it arrived, decompressed.' }),
+    bytes: z.int(),
+    text: z.string().nullable().meta({ description: `The body; null where the workspace keeps none, or it has more than ${KEPT_BODY_BYTES} bytes.` }),
+  }).nullable().meta({ description: 'Of calls that compute; null for others.' }),
+}).meta({ id: 'HistoryRecord' });
+
+export const getHistoryEntryEndpoint = endpoint({
+  id: 'getHistoryEntry', method: 'get', path: '/history/{id}', tag: 'History', summary: 'One API call, with its body where that is kept',
+  auth: 'caller', permission: 'history.read', params: z.strictObject({ id: z.string() }), status: 200, response: historyRecord, problems: [401, 403, 404, 429, 503],
+});
+
+export const historySettings = z.strictObject({
+  keepBodies: z.boolean({ error: 'must be true or false' }).meta({ description: `Whether the bodies of calls that compute are kept, up to ${KEPT_BODY_BYTES} bytes each. Otherwise only their SHA-256 is.` }),
+  retentionDays: z.int({ error: 'must be a whole number from 1 to 3650, or null' }).min(1, { error: 'must be a whole number from 1 to 3650, or null' }).max(3650, { error: 'must be a whole number from 1 to 3650, or null' }).nullable()
+    .meta({ description: 'Days after which calls are forgotten; null for never. Usage and runs stay.' }),
+}).meta({ id: 'HistorySettings' });
+
+export const getHistorySettingsEndpoint = endpoint({
+  id: 'getHistorySettings', method: 'get', path: '/history/settings', tag: 'History', summary: 'What the history keeps, and for how long',
+  auth: 'caller', permission: 'history.read', status: 200, response: historySettings, problems: [401, 403, 429, 503],
+});
+
+export const changeHistorySettingsEndpoint = endpoint({
+  id: 'changeHistorySettings', method: 'put', path: '/history/settings', tag: 'History', summary: 'Change what the history keeps; in force on the next call',
+  auth: 'session', permission: 'history.settings', body: historySettings, status: 200, response: historySettings, problems: [400, 401, 403, 413, 415, 422, 429, 503],
+  example: { keepBodies: true, retentionDays: 365 },
+});
+
+export type HistoryRecordDocument = z.output<typeof historyRecord>;
 export type HistoryFilterQuery = z.output<typeof historyFilterQuery>;
 export type HistoryQuery = z.output<typeof historyQuery>;
 export type HistoryEntryDocument = z.output<typeof historyEntry>;

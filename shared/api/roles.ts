@@ -12,6 +12,7 @@ export const PERMISSIONS = {
   'keys.issue': { title: 'Issue API keys', administrator: 'all', integrator: 'none', engineer: 'none', reviewer: 'none' },
   'keys.revoke': { title: 'Revoke API keys', administrator: 'all', integrator: 'none', engineer: 'none', reviewer: 'none' },
   'history.read': { title: 'Read the request history', administrator: 'all', integrator: 'all', engineer: 'own', reviewer: 'all' },
+  'history.settings': { title: 'Change what the history keeps', administrator: 'all', integrator: 'none', engineer: 'none', reviewer: 'none' },
   'runs.read': { title: 'Read runs', administrator: 'all', integrator: 'all', engineer: 'own', reviewer: 'all' },
   'usage.read': { title: 'Read usage by key and role', administrator: 'all', integrator: 'own', engineer: 'own', reviewer: 'all' },
   'limits.read': { title: 'Read the limits of roles', administrator: 'all', integrator: 'all', engineer: 'all', reviewer: 'all' },

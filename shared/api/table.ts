@@ -2,7 +2,7 @@ import { convertEndpoint } from './attitude.ts';
 import { getConventionEndpoint, listConventionsEndpoint } from './conventions.ts';
 import type { Endpoint } from './endpoint.ts';
 import { healthEndpoint } from './health.ts';
-import { exportHistoryEndpoint, listHistoryEndpoint } from './history.ts';
+import { changeHistorySettingsEndpoint, exportHistoryEndpoint, getHistoryEntryEndpoint, getHistorySettingsEndpoint, listHistoryEndpoint } from './history.ts';
 import { issueKeyEndpoint, listKeysEndpoint, revokeKeyEndpoint } from './keys.ts';
 import { identifyEndpoint } from './identify.ts';
 import { ratesEndpoint } from './rates.ts';
@@ -31,6 +31,9 @@ export const ENDPOINTS: readonly Endpoint[] = [
   changeKeyLimitsEndpoint,
   listHistoryEndpoint,
   exportHistoryEndpoint,
+  getHistorySettingsEndpoint,
+  changeHistorySettingsEndpoint,
+  getHistoryEntryEndpoint,
   ownUsageEndpoint,
   usageByKeyEndpoint,
   listLimitsEndpoint,

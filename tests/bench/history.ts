@@ -68,7 +68,7 @@ function rowOf(i: number, random: SeededRandom): NewRequest {
     at: START + i * 7_000, keyId: key.id, personId: null, ownerId: ownerOf(key.role), role: key.role, method: 'POST',
     route: verifies ? '/api/v1/verify' : '/api/v1/convert', status, code: status === 200 ? null : 'some-problem', durationUs: 900, attitudes: status === 200 ? 40 : 0,
     warnings: warned ? 3 : 0, warningCodes: warned ? random.pick(['near-gimbal-lock', 'near-gimbal-lock', 'near-gimbal-lock,renormalised', 'gimbal-lock']) : '',
-    verdict: verifies && status === 200 ? (random.chance(0.9) ? 'pass' : 'fail') : null,
+    verdict: verifies && status === 200 ? (random.chance(0.9) ? 'pass' : 'fail') : null, bodySha256: null, bodyBytes: null,
   };
 }
 

@@ -23,6 +23,9 @@ export interface RequestRow {
   warningCodes: string;
   /** Of the run that the call made, if it made one. */
   verdict: 'pass' | 'fail' | null;
+  /** Of the body as it arrived, decompressed; null where the body is none of the history's business. */
+  bodySha256: string | null;
+  bodyBytes: number | null;
 }
 
 export type RequestModel = ModelStatic<Model<RequestRow, Omit<RequestRow, 'id'>>>;
@@ -45,5 +48,7 @@ export function defineRequest(sequelize: Sequelize): RequestModel {
     warnings: { type: DataTypes.INTEGER, allowNull: false },
     warningCodes: { type: DataTypes.TEXT, allowNull: false },
     verdict: { type: DataTypes.TEXT },
+    bodySha256: { type: DataTypes.TEXT },
+    bodyBytes: { type: DataTypes.INTEGER },
   }, { tableName: 'requests' });
 }

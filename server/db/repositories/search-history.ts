@@ -45,7 +45,7 @@ interface Condition {
 }
 
 /** Rows that one page looks at, at most: what bounds its time on a history of any size. */
-export const LOOKED_AT_MOST = 12_000;
+export const LOOKED_AT_MOST = 5_000;
 /** A condition's density is told by how far back this many of its rows reach. */
 const PROBED = 1_000;
 
@@ -87,8 +87,8 @@ export async function searchHistory(sequelize: Sequelize, filter: HistoryFilter,
   }
 }
 
-const COLUMNS = `r.id, r.request_id AS requestId, r.at, r.key_id AS keyId, r.person_id AS personId, r.owner_id AS ownerId, r.role, r.method, r.route,
-  r.status, r.code, r.duration_us AS durationUs, r.attitudes, r.warnings, r.warning_codes AS warningCodes, r.verdict,
+export const COLUMNS = `r.id, r.request_id AS requestId, r.at, r.key_id AS keyId, r.person_id AS personId, r.owner_id AS ownerId, r.role, r.method, r.route,
+  r.status, r.code, r.duration_us AS durationUs, r.attitudes, r.warnings, r.warning_codes AS warningCodes, r.verdict, r.body_sha256 AS bodySha256, r.body_bytes AS bodyBytes,
   k.name AS keyName, k.prefix AS keyPrefix, p.name AS personName`;
 
 function conditionsOf({ ownerId, keyId, role, route, status, statusClass, verdict, warning, requestId }: HistoryFilter): Condition[] {

@@ -4,14 +4,14 @@ import type { RequestRow } from '../models/request.ts';
 export type NewRequest = Omit<RequestRow, 'id'>;
 
 const COLUMNS = [
-  'request_id', 'at', 'key_id', 'person_id', 'owner_id', 'role', 'method', 'route', 'status', 'code', 'duration_us', 'attitudes', 'warnings', 'warning_codes', 'verdict',
+  'request_id', 'at', 'key_id', 'person_id', 'owner_id', 'role', 'method', 'route', 'status', 'code', 'duration_us', 'attitudes', 'warnings', 'warning_codes', 'verdict', 'body_sha256', 'body_bytes',
 ] as const;
 
 /** Well within the 32,766 bound values that SQLite takes a statement, and short enough to read in an error. */
 const ROWS_PER_STATEMENT = 200;
 
 const valuesOf = (row: NewRequest): (string | number | null)[] => [
-  row.requestId, row.at, row.keyId, row.personId, row.ownerId, row.role, row.method, row.route, row.status, row.code, row.durationUs, row.attitudes, row.warnings, row.warningCodes, row.verdict,
+  row.requestId, row.at, row.keyId, row.personId, row.ownerId, row.role, row.method, row.route, row.status, row.code, row.durationUs, row.attitudes, row.warnings, row.warningCodes, row.verdict, row.bodySha256, row.bodyBytes,
 ];
 
 /** Stores a group of history rows with the codes of their warnings, the last use of their keys and the meter, in raw SQL: building a model per row costs more than the insert. */

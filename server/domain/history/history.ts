@@ -1,9 +1,10 @@
 import { PAGE_SIZE } from '#shared/api/limits.ts';
-import type { HistoryEntryDocument, HistoryFilterQuery, HistoryQuery } from '#shared/api/history.ts';
+import type { HistoryEntryDocument, HistoryFilterQuery, HistoryQuery, HistoryRecordDocument } from '#shared/api/history.ts';
 import type { HistoryRepository } from '#server/db/repositories/history.ts';
 import type { HistoryPosition, HistoryRow } from '#server/db/repositories/search-history.ts';
 import { scopeOf, type Caller } from '../caller.ts';
 import { toTimestamp } from '../clock.ts';
+import { DomainError } from '../errors.ts';
 import { csvRow } from './csv.ts';
 import { readCursor, readFilter, writeCursor } from './read-filter.ts';
 
@@ -32,6 +33,13 @@ export async function listHistory({ history }: HistoryContext, caller: Caller, q
     nextCursor: next && writeCursor(next),
     searchedBackTo: next && rows.length < limit ? toTimestamp(next.at) : null,
   };
+}
+
+/** @throws DomainError `not-found`, also for a call that the caller may not see. */
+export async function getHistoryEntry({ history }: HistoryContext, caller: Caller, id: string): Promise<HistoryRecordDocument> {
+  const row = await history.byRequestId(id.toLowerCase(), scopeOf(caller, 'history.read'));
+  if (!row) throw new DomainError('not-found', `The history holds no call with the id "${id.slice(0, 100)}".`);
+  return { ...presentEntry(row), body: row.bodySha256 === null ? null : { sha256: row.bodySha256, bytes: row.bodyBytes!, text: row.body } };
 }
 
 /** The whole of the caller's history that passes the filter as CSV, newest first, fetched as fast as it is taken. */

@@ -1,6 +1,6 @@
 import type { Router } from 'express';
-import { exportHistoryEndpoint, listHistoryEndpoint } from '#shared/api/history.ts';
-import { exportHistory, listHistory } from '#server/domain/history/history.ts';
+import { changeHistorySettingsEndpoint, exportHistoryEndpoint, getHistoryEntryEndpoint, getHistorySettingsEndpoint, listHistoryEndpoint } from '#shared/api/history.ts';
+import { exportHistory, getHistoryEntry, listHistory } from '#server/domain/history/history.ts';
 import type { Services } from '#server/services.ts';
 import { mount } from '../mount.ts';
 
@@ -11,4 +11,8 @@ export function historyRoutes(services: Services, router: Router): void {
     call.response.setHeader('Content-Disposition', `attachment; filename="history-${new Date(services.clock()).toISOString().slice(0, 10)}.csv"`);
     return rows;
   });
+  // Before the entries: "settings" is no request id.
+  mount(services, router, getHistorySettingsEndpoint)(() => services.historySettings.current);
+  mount(services, router, changeHistorySettingsEndpoint)(({ caller, body }) => services.historySettings.change(body, caller.ownerId, services.clock()));
+  mount(services, router, getHistoryEntryEndpoint)(({ caller, params }) => getHistoryEntry(services, caller, params.id));
 }
