@@ -1,10 +1,12 @@
 import { z } from 'zod';
+import { RATE_UNITS } from '../attitude/rates/rate.ts';
 import { warning } from './attitude.ts';
 import { pageQuery, timestamp } from './common.ts';
 import { conventionFacets, conventionReference } from './convention.ts';
 import { endpoint } from './endpoint.ts';
 import { identification } from './identify.ts';
-import { attitudeRows } from './numbers.ts';
+import { attitudeRows, numberRows } from './numbers.ts';
+import { rateFacets, rateReference } from './rates.ts';
 
 const toleranceUnit = z.enum(['deg', 'rad', 'arcsec']);
 const tolerance = z.strictObject({
@@ -51,13 +53,54 @@ export const verifyEndpoint = endpoint({
   },
 });
 
-export const run = z.strictObject({
+const rateUnit = z.enum(RATE_UNITS);
+const rateTolerance = z.strictObject({ rate: z.number({ error: 'must be a number greater than 0' }).positive({ error: 'must be greater than 0' }), unit: rateUnit }).meta({ id: 'RateTolerance' });
+const worstRate = z.strictObject({
+  index: z.int().nonnegative(), rate: z.number(), unit: rateUnit,
+  axisBody: z.tuple([z.number(), z.number(), z.number()]).meta({ description: 'Unit direction in forward, right, down of the actual angular velocity less the expected one.' }),
+}).meta({ id: 'WorstRateError' });
+const rateStatistics = z.strictObject({ rms: z.number(), median: z.number(), p95: z.number(), max: z.number(), unit: rateUnit }).meta({ id: 'RateErrorStatistics' });
+const rateFailures = z.array(z.strictObject({ index: z.int().nonnegative(), rate: z.number() })).max(100);
+const listedRates = z.strictObject({ rate: rateReference, rates: numberRows });
+
+export const verifyRatesInput = z.strictObject({
+  attitude: listed.meta({ description: 'The attitudes at which the rates stand, one for each.' }),
+  expected: listedRates, actual: listedRates, tolerance: rateTolerance,
+  label: label.optional(), commit: commit.optional(),
+}).meta({ id: 'VerifyRatesInput' });
+
+export const verifyRatesOutput = z.strictObject({
+  verdict, run: z.string(), count: z.int(), failed: z.int(), worst: worstRate, statistics: rateStatistics, failures: rateFailures, summary: z.string(), engine: z.string(),
+}).meta({ id: 'VerifyRatesOutput' });
+
+export const verifyRatesEndpoint = endpoint({
+  id: 'verifyRates', method: 'post', path: '/verify-rates', tag: 'Attitude',
+  summary: 'Verify rates that code computed against expected ones',
+  description: 'The error is the length of the difference of the two angular velocities, whatever forms the rates come in; never a difference of Euler rates. The verdict is kept as a run.',
+  auth: 'caller', permission: 'attitude.compute', recordsSessions: true,
+  body: verifyRatesInput, status: 200, response: verifyRatesOutput, problems: [400, 401, 403, 413, 415, 422, 429, 503],
+  example: {
+    attitude: { convention: { preset: 'aircraft-euler-deg' }, attitudes: [[0, 0, 35]] },
+    expected: { rate: { rate: 'euler', unit: 'deg/s' }, rates: [[9, 0, 0]] }, actual: { rate: { rate: 'body', unit: 'deg/s' }, rates: [[0, 5.162, 7.372]] },
+    tolerance: { rate: 0.01, unit: 'deg/s' }, label: 'Rate gyros',
+  },
+});
+
+const ofRun = {
   id: z.string(), at: timestamp, verdict, label: z.string().nullable(), commit: z.string().nullable(),
   key: z.strictObject({ id: z.string(), name: z.string() }).nullable(), person: z.strictObject({ id: z.string(), name: z.string() }).nullable(),
-  count: z.int(), failed: z.int(), tolerance, worst, statistics,
-  expected: conventionFacets, actual: conventionFacets, failures, summary: z.string(), engine: z.string(),
+  count: z.int(), failed: z.int(), summary: z.string(), engine: z.string(),
+};
+const attitudeRun = z.strictObject({
+  kind: z.literal('attitudes'), ...ofRun, tolerance, worst, statistics, expected: conventionFacets, actual: conventionFacets, failures,
   diagnosis: identification.optional().meta({ description: 'Where one was asked for and the verdict is fail; at most the ten plainest explanations are kept.' }),
-}).meta({ id: 'Run' });
+}).meta({ id: 'AttitudeRun' });
+const rateRun = z.strictObject({
+  kind: z.literal('rates'), ...ofRun, tolerance: rateTolerance, worst: worstRate, statistics: rateStatistics,
+  attitude: conventionFacets, expected: rateFacets, actual: rateFacets, failures: rateFailures,
+}).meta({ id: 'RateRun' });
+
+export const run = z.discriminatedUnion('kind', [attitudeRun, rateRun]).meta({ id: 'Run' });
 
 export const listRunsEndpoint = endpoint({
   id: 'listRuns', method: 'get', path: '/runs', tag: 'Runs', summary: 'Runs, newest first',
@@ -80,4 +123,6 @@ export const getRunEndpoint = endpoint({
 
 export type VerifyInput = z.output<typeof verifyInput>;
 export type VerifyOutput = z.output<typeof verifyOutput>;
+export type VerifyRatesInput = z.output<typeof verifyRatesInput>;
+export type VerifyRatesOutput = z.output<typeof verifyRatesOutput>;
 export type RunDocument = z.output<typeof run>;

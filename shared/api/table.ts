@@ -8,7 +8,7 @@ import { identifyEndpoint } from './identify.ts';
 import { ratesEndpoint } from './rates.ts';
 import { resolveEndpoint } from './resolve.ts';
 import { rigidBodyEndpoint } from './rigid-body.ts';
-import { getRunEndpoint, getRunJUnitEndpoint, listRunsEndpoint, verifyEndpoint } from './runs.ts';
+import { getRunEndpoint, getRunJUnitEndpoint, listRunsEndpoint, verifyEndpoint, verifyRatesEndpoint } from './runs.ts';
 import { currentSessionEndpoint, signInEndpoint, signOutEndpoint } from './sessions.ts';
 import { changeKeyLimitsEndpoint, changeLimitsEndpoint, listLimitsEndpoint, ownUsageEndpoint, usageByKeyEndpoint } from './usage.ts';
 
@@ -17,6 +17,7 @@ export const ENDPOINTS: readonly Endpoint[] = [
   convertEndpoint,
   ratesEndpoint,
   verifyEndpoint,
+  verifyRatesEndpoint,
   identifyEndpoint,
   resolveEndpoint,
   rigidBodyEndpoint,

@@ -5,11 +5,11 @@ import type { RunDocument } from '#shared/api/runs.ts';
  * Names are unique, times plain decimals, and no attribute stands where consumers refuse one.
  */
 export function runAsJUnit(run: RunDocument): string {
-  const suite = run.label ?? 'Attitude verification';
-  const within = `within ${run.tolerance.angle} ${run.tolerance.unit}`;
+  const [noun, suite] = run.kind === 'rates' ? ['rate', run.label ?? 'Rate verification'] : ['attitude', run.label ?? 'Attitude verification'];
+  const within = `within ${sizeOf(run.tolerance)} ${run.tolerance.unit}`;
   const cases = [
-    testCase(suite, `all ${run.count} attitudes ${within}`, run.verdict === 'fail' ? `${run.failed} of ${run.count} attitudes are off by more. ${run.summary}${diagnosisOf(run)}` : null),
-    ...run.failures.map(({ index, angle }) => testCase(suite, `attitude ${index} ${within}`, `off by ${angle} ${run.tolerance.unit}`)),
+    testCase(suite, `all ${run.count} ${noun}s ${within}`, run.verdict === 'fail' ? `${run.failed} of ${run.count} ${noun}s are off by more. ${run.summary}${diagnosisOf(run)}` : null),
+    ...run.failures.map((failure) => testCase(suite, `${noun} ${failure.index} ${within}`, `off by ${sizeOf(failure)} ${run.tolerance.unit}`)),
   ];
   const failed = (run.verdict === 'fail' ? 1 : 0) + run.failures.length;
   const counts = `tests="${cases.length}" failures="${failed}" errors="0" time="0.000"`;
@@ -27,7 +27,10 @@ ${cases.join('\n')}
 `;
 }
 
-function diagnosisOf({ diagnosis }: RunDocument): string {
+const sizeOf = (error: { readonly angle: number } | { readonly rate: number }): number => ('angle' in error ? error.angle : error.rate);
+
+function diagnosisOf(run: RunDocument): string {
+  const diagnosis = run.kind === 'attitudes' ? run.diagnosis : undefined;
   const [plainest] = diagnosis?.explanations ?? [];
   if (!diagnosis || !plainest || plainest.edits.length === 0) return '';
   return ` ${diagnosis.outcome === 'unique' ? 'Explained by' : `The plainest of ${diagnosis.remaining} explanations`}: ${plainest.edits.join('; ')}.`;

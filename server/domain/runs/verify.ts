@@ -15,7 +15,7 @@ import { DomainError } from '../errors.ts';
 import type { Meter } from '../meter.ts';
 import type { Identifier } from '#server/identification/identifier.ts';
 import { diagnose } from './diagnose.ts';
-import type { RunDetail } from './present-run.ts';
+import type { AttitudeRunDetail, RunDetail } from './present-run.ts';
 
 const PER_RADIAN = { rad: 1, deg: 180 / Math.PI, arcsec: (180 * 3600) / Math.PI } as const;
 
@@ -52,7 +52,7 @@ export async function verify({ identifier }: VerifyContext, request: VerifyInput
 
   meterWarnings(meter, result.repaired);
   const diagnosis = request.diagnose && result.failed > 0 ? await diagnose(identifier, expected, actual, request) : null;
-  const detail = {
+  const detail: AttitudeRunDetail = {
     ...detailOf(result, tolerance, scale, expected.convention, actual.convention),
     ...(diagnosis ? { diagnosis: { ...diagnosis, explanations: diagnosis.explanations.slice(0, KEPT) } } : {}),
   };
@@ -61,7 +61,7 @@ export async function verify({ identifier }: VerifyContext, request: VerifyInput
     verdict: result.failed > 0 ? 'fail' : 'pass', count: result.count, failed: result.failed, detail,
   };
   const { worst, statistics, failures, summary, engine } = detail;
-  return { run, answer: { verdict: run.verdict, run: run.id, count: run.count, failed: run.failed, worst: { ...worst, axisBody: [...worst.axisBody] }, statistics, failures: [...failures], summary, engine, ...(result.repaired.length > 0 ? { warnings: result.repaired as NonNullable<VerifyOutput['warnings']> } : {}), ...(diagnosis ? { diagnosis } : {}) } };
+  return { run, answer: { verdict: run.verdict, run: run.id, count: run.count, failed: run.failed, worst: { ...worst, axisBody: [...worst.axisBody] as [number, number, number] }, statistics, failures: [...failures], summary, engine, ...(result.repaired.length > 0 ? { warnings: result.repaired as NonNullable<VerifyOutput['warnings']> } : {}), ...(diagnosis ? { diagnosis } : {}) } };
 }
 
 function read({ convention: reference, attitudes }: VerifyInput['expected'], pointer: string): StatedAttitudes {
@@ -81,7 +81,7 @@ function compared(expected: StatedAttitudes, actual: StatedAttitudes, tolerance:
   });
 }
 
-function detailOf({ angles, worst, statistics }: Verification, tolerance: VerifyInput['tolerance'], scale: number, expected: Convention, actual: Convention): RunDetail {
+function detailOf({ angles, worst, statistics }: Verification, tolerance: VerifyInput['tolerance'], scale: number, expected: Convention, actual: Convention): AttitudeRunDetail {
   const { unit } = tolerance;
   const failures: { index: number; angle: number }[] = [];
   for (let index = 0; index < angles.length && failures.length < LISTED_AT_MOST; index++) {

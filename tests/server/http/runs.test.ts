@@ -112,3 +112,36 @@ describe('runs', () => {
     expect(await count()).toBe(before);
   });
 });
+
+describe('POST /verify-rates', () => {
+  const rates = (change: object = {}) => service.call().post('/api/v1/verify-rates').set('Authorization', `Bearer ${secret}`).send({
+    attitude: { convention: DEG, attitudes: [[0, 0, 35], [0, 0, 0]] },
+    expected: { rate: { rate: 'euler', unit: 'deg/s' }, rates: [[9, 0, 0], [9, 0, 0]] },
+    actual: { rate: { rate: 'body', unit: 'deg/s' }, rates: [[0, 9 * Math.sin((35 * Math.PI) / 180), 9 * Math.cos((35 * Math.PI) / 180)], [0, 0, 9.5]] },
+    tolerance: { rate: 0.1, unit: 'deg/s' }, label: 'Rate gyros', ...change,
+  });
+
+  it('keeps a run of rates, told apart from runs of attitudes, with its JUnit report', async () => {
+    const { status, body } = await rates();
+    expect([status, body.verdict, body.count, body.failed]).toEqual([200, 'fail', 2, 1]);
+    expect(body.failures[0].index).toBe(1);
+    expect(body.failures[0].rate).toBeCloseTo(0.5, 12);
+    expect(body.worst).toMatchObject({ index: 1, unit: 'deg/s', axisBody: [0, 0, 1] });
+    expect(body.summary).toBe('Worst at sample 1: 0.5 deg/s about the down axis: beside the expected rate the actual one turns right.');
+    const { body: run } = await get(`/runs/${body.run}`).expect(200);
+    expect(run).toMatchObject({ kind: 'rates', label: 'Rate gyros', tolerance: { rate: 0.1, unit: 'deg/s' }, attitude: { representation: 'euler' }, expected: { rate: 'euler', angles: { sequence: 'ZYX' } }, actual: { rate: 'body', unit: 'deg/s' } });
+    const { text } = await get(`/runs/${body.run}.junit.xml`).expect(200);
+    expect(text).toContain('name="all 2 rates within 0.1 deg/s"');
+    expect(text).toContain('name="rate 1 within 0.1 deg/s"');
+  });
+
+  it.each<[string, object, string, string]>([
+    ['too few rates', { actual: { rate: { rate: 'body', unit: 'deg/s' }, rates: [[1, 2, 3]] } }, 'count-mismatch', '/actual/rates'],
+    ['a rate of two numbers', { actual: { rate: { rate: 'body', unit: 'deg/s' }, rates: [[1, 2, 3], [1, 2]] } }, 'count-mismatch', '/actual/rates/1'],
+    ['a tolerance in degrees', { tolerance: { rate: 1, unit: 'deg' } }, 'invalid-field', '/tolerance/unit'],
+    ['a derivative that the attitude does not have', { actual: { rate: { rate: 'dcm' }, rates: [[1], [2]] } }, 'invalid-facet', '/actual/rate/rate'],
+  ])('refuses %s', async (_what, change, code, pointer) => {
+    const { status, body } = await rates(change);
+    expect([status, body.code, body.errors[0].pointer]).toEqual([422, code, pointer]);
+  });
+});

@@ -70,6 +70,28 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/verify-rates": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /**
+         * Verify rates that code computed against expected ones
+         * @description The error is the length of the difference of the two angular velocities, whatever forms the rates come in; never a difference of Euler rates. The verdict is kept as a run.
+         *
+         *     Roles: administrator, integrator, engineer.
+         */
+        post: operations["verifyRates"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/identify": {
         parameters: {
             query?: never;
@@ -549,6 +571,44 @@ export interface components {
             expiresAt: string | null;
             lastUsedAt: string | null;
             revokedAt: string | null;
+        };
+        AttitudeRun: {
+            /** @constant */
+            kind: "attitudes";
+            id: string;
+            /**
+             * Format: date-time
+             * @example 2026-05-04T08:30:00.000Z
+             */
+            at: string;
+            /** @enum {string} */
+            verdict: "pass" | "fail";
+            label: string | null;
+            commit: string | null;
+            key: {
+                id: string;
+                name: string;
+            } | null;
+            person: {
+                id: string;
+                name: string;
+            } | null;
+            count: number;
+            failed: number;
+            summary: string;
+            engine: string;
+            tolerance: components["schemas"]["Tolerance"];
+            worst: components["schemas"]["WorstError"];
+            statistics: components["schemas"]["ErrorStatistics"];
+            expected: components["schemas"]["ConventionFacets"];
+            actual: components["schemas"]["ConventionFacets"];
+            /** @description The first 100 attitudes off by more than the tolerance, with the angle in its unit. */
+            failures: {
+                index: number;
+                angle: number;
+            }[];
+            /** @description Where one was asked for and the verdict is fail; at most the ten plainest explanations are kept. */
+            diagnosis?: components["schemas"]["Identification"];
         };
         /** @description A constant rotation T = R(axis, angle) on one side: the numbers mean C T (reference) or T C (body) where C is the true attitude. */
         ConstantOffset: {
@@ -1102,6 +1162,14 @@ export interface components {
             /** @constant */
             rate: "dcm";
         };
+        RateErrorStatistics: {
+            rms: number;
+            median: number;
+            p95: number;
+            max: number;
+            /** @enum {string} */
+            unit: "deg/s" | "rad/s";
+        };
         RateExplanation: {
             attitude: components["schemas"]["ConventionFacets"];
             rate: {
@@ -1139,6 +1207,59 @@ export interface components {
             remaining: number;
             unobservable: string[];
             discriminating: components["schemas"]["DiscriminatingAttitude"][];
+        };
+        RateRun: {
+            /** @constant */
+            kind: "rates";
+            id: string;
+            /**
+             * Format: date-time
+             * @example 2026-05-04T08:30:00.000Z
+             */
+            at: string;
+            /** @enum {string} */
+            verdict: "pass" | "fail";
+            label: string | null;
+            commit: string | null;
+            key: {
+                id: string;
+                name: string;
+            } | null;
+            person: {
+                id: string;
+                name: string;
+            } | null;
+            count: number;
+            failed: number;
+            summary: string;
+            engine: string;
+            tolerance: components["schemas"]["RateTolerance"];
+            worst: components["schemas"]["WorstRateError"];
+            statistics: components["schemas"]["RateErrorStatistics"];
+            attitude: components["schemas"]["ConventionFacets"];
+            expected: {
+                /** @enum {string} */
+                rate: "body" | "reference" | "euler" | "quaternion" | "dcm";
+                /** @enum {string} */
+                unit?: "deg/s" | "rad/s";
+                angles?: components["schemas"]["ConventionFacets"];
+            };
+            actual: {
+                /** @enum {string} */
+                rate: "body" | "reference" | "euler" | "quaternion" | "dcm";
+                /** @enum {string} */
+                unit?: "deg/s" | "rad/s";
+                angles?: components["schemas"]["ConventionFacets"];
+            };
+            failures: {
+                index: number;
+                rate: number;
+            }[];
+        };
+        RateTolerance: {
+            rate: number;
+            /** @enum {string} */
+            unit: "deg/s" | "rad/s";
         };
         RatesInput: {
             attitude: components["schemas"]["Convention"];
@@ -1324,42 +1445,7 @@ export interface components {
             attitudesPerCall: number;
             parallelRequests: number;
         };
-        Run: {
-            id: string;
-            /**
-             * Format: date-time
-             * @example 2026-05-04T08:30:00.000Z
-             */
-            at: string;
-            /** @enum {string} */
-            verdict: "pass" | "fail";
-            label: string | null;
-            commit: string | null;
-            key: {
-                id: string;
-                name: string;
-            } | null;
-            person: {
-                id: string;
-                name: string;
-            } | null;
-            count: number;
-            failed: number;
-            tolerance: components["schemas"]["Tolerance"];
-            worst: components["schemas"]["WorstError"];
-            statistics: components["schemas"]["ErrorStatistics"];
-            expected: components["schemas"]["ConventionFacets"];
-            actual: components["schemas"]["ConventionFacets"];
-            /** @description The first 100 attitudes off by more than the tolerance, with the angle in its unit. */
-            failures: {
-                index: number;
-                angle: number;
-            }[];
-            summary: string;
-            engine: string;
-            /** @description Where one was asked for and the verdict is fail; at most the ten plainest explanations are kept. */
-            diagnosis?: components["schemas"]["Identification"];
-        };
+        Run: components["schemas"]["AttitudeRun"] | components["schemas"]["RateRun"];
         SignInInput: {
             email: string;
             password: string;
@@ -1436,6 +1522,42 @@ export interface components {
             warnings?: components["schemas"]["Warning"][];
             diagnosis?: components["schemas"]["Identification"];
         };
+        VerifyRatesInput: {
+            /** @description The attitudes at which the rates stand, one for each. */
+            attitude: {
+                convention: components["schemas"]["Convention"];
+                /** @description One array of numbers per attitude, in the count and order that the convention states. A row-major matrix may also stand as three rows of three. */
+                attitudes: (number | number[])[][];
+            };
+            expected: {
+                rate: components["schemas"]["Rate"];
+                /** @description One row of numbers per attitude, in the order and count that the convention states. */
+                rates: number[][];
+            };
+            actual: {
+                rate: components["schemas"]["Rate"];
+                /** @description One row of numbers per attitude, in the order and count that the convention states. */
+                rates: number[][];
+            };
+            tolerance: components["schemas"]["RateTolerance"];
+            label?: string;
+            commit?: string;
+        };
+        VerifyRatesOutput: {
+            /** @enum {string} */
+            verdict: "pass" | "fail";
+            run: string;
+            count: number;
+            failed: number;
+            worst: components["schemas"]["WorstRateError"];
+            statistics: components["schemas"]["RateErrorStatistics"];
+            failures: {
+                index: number;
+                rate: number;
+            }[];
+            summary: string;
+            engine: string;
+        };
         Warning: {
             /** @enum {string} */
             code: "near-gimbal-lock" | "severe-gimbal-lock" | "gimbal-lock" | "renormalised" | "reorthonormalised";
@@ -1470,6 +1592,18 @@ export interface components {
             /** @enum {string} */
             unit: "deg" | "rad" | "arcsec";
             /** @description Unit axis in forward, right, down: the rotation by the angle about it carries the expected attitude into the actual one. */
+            axisBody: [
+                number,
+                number,
+                number
+            ];
+        };
+        WorstRateError: {
+            index: number;
+            rate: number;
+            /** @enum {string} */
+            unit: "deg/s" | "rad/s";
+            /** @description Unit direction in forward, right, down of the actual angular velocity less the expected one. */
             axisBody: [
                 number,
                 number,
@@ -1885,6 +2019,178 @@ export interface operations {
                 };
                 content: {
                     "application/json": components["schemas"]["VerifyOutput"];
+                };
+            };
+            /** @description Bad Request. Codes: malformed-json, malformed-request, invalid-cursor. */
+            400: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Unauthorized. Codes: missing-key, invalid-key, revoked-key, expired-key, not-signed-in, wrong-credentials. */
+            401: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Forbidden. Codes: not-allowed, cross-site. */
+            403: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Payload Too Large. Codes: body-too-large, batch-too-large. */
+            413: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Unsupported Media Type. Codes: unsupported-media-type, unsupported-encoding. */
+            415: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Unprocessable Entity. Codes: unknown-preset, unknown-interface, missing-facet, unknown-facet, invalid-facet, missing-field, unknown-field, invalid-field, count-mismatch, not-a-number, not-finite, zero-norm, not-a-rotation, improper-axes, unrelated-frames, not-representable, invalid-convention, impossible-inertia. */
+            422: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Too Many Requests. Codes: too-many-requests, too-many-parallel, quota-exceeded. */
+            429: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Internal Server Error. Codes: internal, cross-check-failed. */
+            500: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+            /** @description Service Unavailable. Codes: not-recorded. */
+            503: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["Problem"];
+                };
+            };
+        };
+    };
+    verifyRates: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                /**
+                 * @example {
+                 *       "attitude": {
+                 *         "convention": {
+                 *           "preset": "aircraft-euler-deg"
+                 *         },
+                 *         "attitudes": [
+                 *           [
+                 *             0,
+                 *             0,
+                 *             35
+                 *           ]
+                 *         ]
+                 *       },
+                 *       "expected": {
+                 *         "rate": {
+                 *           "rate": "euler",
+                 *           "unit": "deg/s"
+                 *         },
+                 *         "rates": [
+                 *           [
+                 *             9,
+                 *             0,
+                 *             0
+                 *           ]
+                 *         ]
+                 *       },
+                 *       "actual": {
+                 *         "rate": {
+                 *           "rate": "body",
+                 *           "unit": "deg/s"
+                 *         },
+                 *         "rates": [
+                 *           [
+                 *             0,
+                 *             5.162,
+                 *             7.372
+                 *           ]
+                 *         ]
+                 *       },
+                 *       "tolerance": {
+                 *         "rate": 0.01,
+                 *         "unit": "deg/s"
+                 *       },
+                 *       "label": "Rate gyros"
+                 *     }
+                 */
+                "application/json": components["schemas"]["VerifyRatesInput"];
+            };
+        };
+        responses: {
+            /** @description OK */
+            200: {
+                headers: {
+                    /** @description The id of this call in the history. */
+                    "X-Request-Id"?: string;
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["VerifyRatesOutput"];
                 };
             };
             /** @description Bad Request. Codes: malformed-json, malformed-request, invalid-cursor. */

@@ -1,11 +1,14 @@
 import { keepPreviousData, queryOptions, useMutation } from '@tanstack/react-query';
 import type { Convention } from '../../../../../shared/attitude/convention.ts';
 import type { Identification } from '../../../../../shared/attitude/identification/identification.ts';
+import type { Rate } from '../../../../../shared/attitude/rates/rate.ts';
 import { client, dataOf } from '../../../lib/api-client.ts';
 import type { components } from '../../../lib/contract.gen.ts';
 
 /** The client loosens tuples to arrays; the contract has them. */
-export type Run = Omit<components['schemas']['Run'], 'expected' | 'actual' | 'diagnosis'> & { expected: Convention; actual: Convention; diagnosis?: Identification };
+export type AttitudeRun = Omit<components['schemas']['AttitudeRun'], 'expected' | 'actual' | 'diagnosis'> & { expected: Convention; actual: Convention; diagnosis?: Identification };
+export type RateRun = Omit<components['schemas']['RateRun'], 'attitude' | 'expected' | 'actual'> & { attitude: Convention; expected: Rate; actual: Rate };
+export type Run = AttitudeRun | RateRun;
 export type Tolerance = components['schemas']['Tolerance'];
 
 export interface RunsFilter {

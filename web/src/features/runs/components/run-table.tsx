@@ -2,7 +2,7 @@ import { Link } from 'react-router-dom';
 import { Table } from '../../../components/table.tsx';
 import { VerdictMark } from '../../../components/verdict-mark.tsx';
 import { count, time } from '../../../lib/format.ts';
-import { angle } from '../model/angle.ts';
+import { angle, sizeOf } from '../model/angle.ts';
 import type { Run } from '../api/runs.ts';
 
 export function RunTable({ runs }: { runs: readonly Run[] }) {
@@ -14,7 +14,7 @@ export function RunTable({ runs }: { runs: readonly Run[] }) {
       { title: 'By', cell: (run) => run.key?.name ?? run.person?.name ?? '—' },
       { title: 'Commit', cell: (run) => (run.commit === null ? '—' : <code>{run.commit.slice(0, 8)}</code>) },
       { title: 'Failed', numeric: true, nowrap: true, cell: (run) => <span className="figures">{count(run.failed)} of {count(run.count)}</span> },
-      { title: 'Worst', numeric: true, nowrap: true, cell: (run) => <span className="figures">{angle(run.worst.angle, run.worst.unit)}</span> },
+      { title: 'Worst', numeric: true, nowrap: true, cell: (run) => <span className="figures">{angle(sizeOf(run.worst), run.worst.unit)}</span> },
     ]} />
   );
 }
