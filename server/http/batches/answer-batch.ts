@@ -14,6 +14,9 @@ export async function answerBatch(services: Services, call: Call, route: string,
   if (!input) refuseStatedTwice(request.query);
   const rows = input ? { format: input, ...readQuery(request) } : null;
   const body = await wholeBody(request, JSON_BODY_BYTES);
+  // A copy, since the bytes themselves move to the other thread.
+  call.body = Buffer.from(body);
+  call.bodyMayBeKept = true;
   const { attitudesPerCall: most } = services.limits.of(call.caller!);
   const converted = await services.batches.convert({ body, rows, output, most });
   let bytes: Uint8Array;

@@ -1,3 +1,4 @@
+import { createHash } from 'node:crypto';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { createConverter } from '#shared/attitude/converter.ts';
 import { PRESETS } from '#shared/attitude/presets.ts';
@@ -55,6 +56,14 @@ describe('POST /convert of rows', () => {
     expect([answer.status, answer.headers['content-type']!.split(';')[0]]).toEqual([200, accept]);
     expect(READERS[accept](answer.bytes)).toEqual(QUATERNIONS);
     expect(await history(answer.headers['x-request-id'])).toMatchObject({ status: 200, code: null, attitudes: 3 });
+  });
+
+  it('keeps the SHA-256 of a long JSON body in the history, as of a short one', async () => {
+    const body = JSON.stringify({ from: { preset: 'aircraft-euler-deg' }, to: { preset: 'aircraft-quaternion' }, attitudes: ROWS, options: {} }) + ' '.repeat(600_000);
+    const answer = await send('application/json', null, body, '/api/v1/convert');
+    expect(READERS['application/json'](answer.bytes)).toEqual(QUATERNIONS);
+    const [[row]] = await service.services.database.sequelize.query(`SELECT body_sha256, body_bytes FROM requests WHERE request_id = '${String(answer.headers['x-request-id'])}'`) as unknown as [[object]];
+    expect(row).toEqual({ body_sha256: createHash('sha256').update(body).digest('hex'), body_bytes: body.length });
   });
 
   it('answers in the content type of the body where Accept says nothing', async () => {
