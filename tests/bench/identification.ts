@@ -1,5 +1,5 @@
 /**
- * Times the identification of conventions: `npm run bench:identification`.
+ * Times the identification of conventions: `npm run bench:identification`, and after the core in `npm run bench`.
  *
  * Rows are kinds of motion and counts of attitudes; the figures are milliseconds a call, the least and the median of the
  * rounds, with one mistake in the numbers and without times; then with times and a lag of 40 ms. Reading JSON is not counted.
