@@ -6,8 +6,10 @@ import { ProblemNotice } from '../../components/notice.tsx';
 import { PageHeading } from '../../components/page-heading.tsx';
 import { Skeleton } from '../../components/skeleton.tsx';
 import { exportAddress, historyQuery, type HistoryEntry } from '../../features/history/api/history.ts';
+import { historySettingsQuery } from '../../features/history/api/history-settings.ts';
 import { useHistoryFilter } from '../../features/history/api/use-history-filter.ts';
 import { HistoryFilters } from '../../features/history/components/history-filters.tsx';
+import { HistorySettingsDialog } from '../../features/history/components/history-settings-dialog.tsx';
 import { HistoryTable } from '../../features/history/components/history-table.tsx';
 import { RecordDialog } from '../../features/history/components/record-dialog.tsx';
 import { keysQuery } from '../../features/keys/api/keys.ts';
@@ -19,10 +21,18 @@ export function Component() {
   const { data: person } = useQuery(sessionQuery);
   const { data: page, error, isPending } = useQuery(historyQuery(filter));
   const { data: keys = [] } = useQuery({ ...keysQuery, enabled: person != null && person.role !== 'reviewer' });
+  const administers = person?.role === 'administrator';
+  const { data: settings } = useQuery({ ...historySettingsQuery, enabled: administers });
   const [opened, setOpened] = useState<HistoryEntry | null>(null);
+  const [setting, setSetting] = useState(false);
   return (
     <>
-      <PageHeading title="Request history" action={<a href={exportAddress(filter)} download className="inline-flex min-h-10 items-center border border-rule px-3.5 no-underline hover:bg-well">Export as CSV</a>}>
+      <PageHeading title="Request history" action={(
+        <div className="flex flex-wrap gap-3">
+          {administers && settings && <Button onClick={() => setSetting(true)}>What is kept</Button>}
+          <a href={exportAddress(filter)} download className="inline-flex min-h-10 items-center border border-rule px-3.5 no-underline hover:bg-well">Export as CSV</a>
+        </div>
+      )}>
         Every API call, refused ones included: what the service has answered is here before the answer leaves it.
       </PageHeading>
       <HistoryFilters filter={filter} onChange={change} keys={keys} routes={page?.routes ?? []} />
@@ -34,6 +44,7 @@ export function Component() {
         <Button disabled={filter.cursor === ''} onClick={() => change({ cursor: '' })}>Newest</Button>
         <Button disabled={!page?.nextCursor} onClick={() => change({ cursor: page!.nextCursor! })}>Older</Button>
       </div>
+      {setting && settings && <HistorySettingsDialog settings={settings} onClose={() => setSetting(false)} />}
       {opened && <RecordDialog entry={opened} onClose={() => setOpened(null)} />}
     </>
   );
