@@ -35,6 +35,7 @@ export const PROBLEMS = {
   'count-mismatch': { status: 422, title: 'An attitude has the wrong count of numbers' },
   'not-a-number': { status: 422, title: 'Where a number belongs stands something else' },
   'not-finite': { status: 422, title: 'A number is not finite' },
+  'out-of-range': { status: 422, title: 'A number is too large to compute with' },
   'zero-norm': { status: 422, title: 'A quaternion or axis of norm zero has no direction' },
   'not-a-rotation': { status: 422, title: 'The numbers are no rotation' },
   'improper-axes': { status: 422, title: 'The two axis sets differ in handedness' },

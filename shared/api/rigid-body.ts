@@ -1,8 +1,10 @@
 import { z } from 'zod';
+import { LARGEST_COMPONENT } from '../attitude/refuse-out-of-range.ts';
 import { endpoint } from './endpoint.ts';
 import { ATTITUDES_PER_CALL } from './limits.ts';
 
-const number = z.number({ error: 'must be a finite number' });
+const within = `must be a number within ±${LARGEST_COMPONENT}`;
+const number = z.number({ error: within }).min(-LARGEST_COMPONENT, { error: within }).max(LARGEST_COMPONENT, { error: within });
 const vector = z.tuple([number, number, number], { error: 'must hold three numbers, x, y, z' });
 const vectorOut = z.tuple([z.number(), z.number(), z.number()]);
 

@@ -1,6 +1,7 @@
 /** Why a number, a convention or a pair of conventions cannot be used. Callers branch on `code`, never on text. */
 export type AttitudeErrorCode =
   | 'not-finite'
+  | 'out-of-range'
   | 'not-a-rotation'
   | 'zero-norm'
   | 'count-mismatch'

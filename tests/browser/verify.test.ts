@@ -36,3 +36,23 @@ it('an integrator verifies a pasted recording, reads the verdict, and a reviewer
   expect((await download).suggestedFilename()).toMatch(/^run-.*\.junit\.xml$/);
   reviewer.expectQuiet();
 });
+
+it('a run of rates is read with its own units, and says in which form each side was given', async () => {
+  const answer = await fetch(`${demo.url}/api/v1/verify-rates`, {
+    method: 'POST', headers: { Authorization: `Bearer ${demo.keys[0]!.secret}`, 'Content-Type': 'application/json' },
+    body: JSON.stringify({
+      attitude: { convention: { preset: 'aircraft-euler-deg' }, attitudes: [[0, 0, 0]] },
+      expected: { rate: { rate: 'euler', unit: 'deg/s' }, rates: [[9, 0, 0]] }, actual: { rate: { rate: 'body', unit: 'deg/s' }, rates: [[0, 0, 9.5]] }, tolerance: { rate: 0.1, unit: 'deg/s' }, label: 'Rate gyros',
+    }),
+  });
+  expect(answer.status).toBe(200);
+  const { page, expectQuiet } = await openPage(browser);
+  await signIn(page, 'reviewer');
+  await page.goto(`${demo.url}/runs`);
+  await page.getByRole('link', { name: 'Rate gyros' }).click();
+  await page.getByText('1 of 1 rates off by more than the tolerance of 0.1°/s').waitFor();
+  await page.getByText('Worst at sample 0: 0.5 deg/s about the down axis').waitFor();
+  await page.getByText('Rates of Euler angles, deg/s').waitFor();
+  await page.getByText('Angular velocity in body axes, deg/s').waitFor();
+  expectQuiet();
+});

@@ -3,6 +3,7 @@ import { isNamedFrame } from '#shared/attitude/axes.ts';
 import type { Convention } from '#shared/attitude/convention.ts';
 import { createConverter } from '#shared/attitude/converter.ts';
 import { FEWEST } from '#shared/attitude/identification/rates/measured-rates.ts';
+import { LARGEST_COMPONENT } from '#shared/attitude/refuse-out-of-range.ts';
 import type { Identifier } from '#server/identification/identifier.ts';
 import { resolveConvention } from '../conventions/resolve-convention.ts';
 import { DomainError } from '../errors.ts';
@@ -64,7 +65,7 @@ async function identifyRates(identifier: IdentifyContext['identifier'], { refere
   if (count < FEWEST) throw new DomainError('count-mismatch', `${count} attitudes are too few to tell rates from.`, [{ pointer: '/reference/attitudes', message: `must hold at least ${FEWEST} for rates` }]);
   const input = {
     reference: trusted, times: readTimes(times, count, '/reference/attitudes'),
-    observed: { rates: readObserved(observed.rates, count, '/observed/rates'), stated: { attitude, rate } },
+    observed: { rates: readObserved(observed.rates, count, '/observed/rates', LARGEST_COMPONENT), stated: { attitude, rate } },
     noise: { angle: noise.angle, unit: noise.unit, rate: noise.rate ?? 0, rateUnit: noise.rateUnit ?? 'rad/s' },
   } as const;
   return (await identifier.identifyRates(input)) as unknown as RateIdentificationDocument;

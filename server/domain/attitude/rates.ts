@@ -1,6 +1,7 @@
 import type { RatesInput, RatesOutput } from '#shared/api/rates.ts';
 import { createRateConverter } from '#shared/attitude/rates/rate-converter.ts';
 import { NUMBERS_PER_RATE, type Rate } from '#shared/attitude/rates/rate.ts';
+import { LARGEST_COMPONENT } from '#shared/attitude/refuse-out-of-range.ts';
 import { resolveConvention } from '../conventions/resolve-convention.ts';
 import type { Meter } from '../meter.ts';
 import { ENGINE } from './engine.ts';
@@ -19,7 +20,7 @@ export function convertRates(request: RatesInput, meter: Meter): RatesOutput {
   const converter = pointingInto('/samples', () => createRateConverter(attitude, from, to));
   const samples = readSamples(request.samples, '/samples');
   const attitudes = readAttitudes(samples.attitudes, attitude, '/samples', '/attitude');
-  const rates = readRows(samples.rates, { width: NUMBERS_PER_RATE[from.rate], mayNest: false, taker: `the rate "${from.rate}"`, pointer: '/samples', within: '/rate' });
+  const rates = readRows(samples.rates, { width: NUMBERS_PER_RATE[from.rate], mayNest: false, taker: `the rate "${from.rate}"`, pointer: '/samples', within: '/rate', most: LARGEST_COMPONENT });
   const converted = pointingInto('/samples', () => converter.convert(attitudes, rates));
   const warnings = converter.warnings();
 

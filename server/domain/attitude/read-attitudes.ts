@@ -24,9 +24,11 @@ export interface RowShape {
   readonly taker: string;
   readonly pointer: string;
   readonly within: string;
+  /** Largest size of a number; any finite one where absent. */
+  readonly most?: number;
 }
 
-export function readRows(rows: readonly unknown[], { width, mayNest, taker, pointer, within }: RowShape): Float64Array {
+export function readRows(rows: readonly unknown[], { width, mayNest, taker, pointer, within, most = Infinity }: RowShape): Float64Array {
   const faults = new Faults();
   if (rows.length === 0) faults.add('count-mismatch', pointer, 'must hold at least one attitude');
   const numbers = new Float64Array(rows.length * width);
@@ -49,7 +51,10 @@ export function readRows(rows: readonly unknown[], { width, mayNest, taker, poin
     }
     for (let column = 0; column < width; column++) {
       const value: unknown = row[column];
-      if (typeof value === 'number' && Number.isFinite(value)) numbers[index * width + column] = value;
+      if (typeof value === 'number' && Number.isFinite(value)) {
+        numbers[index * width + column] = value;
+        if (Math.abs(value) > most) faults.add('out-of-range', places(column), `is ${value}; it must be within ±${most}`);
+      }
       else if (typeof value === 'number') faults.add('not-finite', places(column), 'is too large for a double');
       else if (value === null) faults.add('not-finite', places(column), 'is null, which is what NaN and infinity become in JSON; it must be a finite number');
       else faults.add('not-a-number', places(column), `is ${Array.isArray(value) ? 'an array' : typeof value === 'string' ? `the text ${JSON.stringify(value.slice(0, 40))}` : `of type ${typeof value}`}; it must be a number`);

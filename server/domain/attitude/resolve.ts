@@ -2,6 +2,7 @@ import type { ProblemItem } from '#shared/api/problems.ts';
 import type { ResolveInput, ResolveOutput } from '#shared/api/resolve.ts';
 import { LISTED_AT_MOST } from '#shared/attitude/errors.ts';
 import { NUMBERS_PER_RATE } from '#shared/attitude/rates/rate.ts';
+import { LARGEST_COMPONENT } from '#shared/attitude/refuse-out-of-range.ts';
 import { resolveVectors } from '#shared/attitude/resolve/resolve-vectors.ts';
 import { resolveConvention } from '../conventions/resolve-convention.ts';
 import { DomainError } from '../errors.ts';
@@ -17,12 +18,12 @@ export function resolveBatch({ attitude: named, from, rate: namedRate, samples }
   const attitude = resolveConvention(named, '/attitude');
   const columns = readSamples(samples, namedRate !== undefined);
   const attitudes = readAttitudes(columns.attitude, attitude, '/samples', '/attitude');
-  const vectors = readRows(columns.vector, { width: 3, mayNest: false, taker: 'a vector', pointer: '/samples', within: '/vector' });
+  const vectors = readRows(columns.vector, { width: 3, mayNest: false, taker: 'a vector', pointer: '/samples', within: '/vector', most: LARGEST_COMPONENT });
   const rate = namedRate === undefined ? null : resolveRate(namedRate, attitude, '/rate');
   const change = rate === null ? null : {
     rate,
-    derivatives: readRows(columns.derivative, { width: 3, mayNest: false, taker: 'a derivative', pointer: '/samples', within: '/derivative' }),
-    rates: readRows(columns.rate, { width: NUMBERS_PER_RATE[rate.rate], mayNest: false, taker: `the rate "${rate.rate}"`, pointer: '/samples', within: '/rate' }),
+    derivatives: readRows(columns.derivative, { width: 3, mayNest: false, taker: 'a derivative', pointer: '/samples', within: '/derivative', most: LARGEST_COMPONENT }),
+    rates: readRows(columns.rate, { width: NUMBERS_PER_RATE[rate.rate], mayNest: false, taker: `the rate "${rate.rate}"`, pointer: '/samples', within: '/rate', most: LARGEST_COMPONENT }),
   };
   const resolved = pointingInto('/samples', () => resolveVectors(attitude, from, { attitudes, vectors, ...(change ? { change } : {}) }));
   return {

@@ -3,6 +3,7 @@ import type { VerifyRatesInput, VerifyRatesOutput } from '#shared/api/runs.ts';
 import type { Convention } from '#shared/attitude/convention.ts';
 import { LISTED_AT_MOST } from '#shared/attitude/errors.ts';
 import { NUMBERS_PER_RATE } from '#shared/attitude/rates/rate.ts';
+import { LARGEST_COMPONENT } from '#shared/attitude/refuse-out-of-range.ts';
 import { rateErrorSentence } from '#shared/attitude/verification/error-sentence.ts';
 import { verifyRates, type RateVerification, type StatedRates } from '#shared/attitude/verification/verify-rates.ts';
 import { ENGINE } from '../attitude/engine.ts';
@@ -43,7 +44,7 @@ export function verifyStatedRates(request: VerifyRatesInput, meter: Meter): { an
 
 function read({ rate: named, rates }: VerifyRatesInput['expected'], attitude: Convention, pointer: string): StatedRates {
   const rate = resolveRate(named, attitude, `${pointer}/rate`);
-  return { rate, numbers: readRows(rates, { width: NUMBERS_PER_RATE[rate.rate], mayNest: false, taker: `the rate "${rate.rate}"`, pointer: `${pointer}/rates`, within: '' }) };
+  return { rate, numbers: readRows(rates, { width: NUMBERS_PER_RATE[rate.rate], mayNest: false, taker: `the rate "${rate.rate}"`, pointer: `${pointer}/rates`, within: '', most: LARGEST_COMPONENT }) };
 }
 
 function detailOf({ sizes, worst, statistics }: RateVerification, tolerance: VerifyRatesInput['tolerance'], scale: number) {

@@ -7,6 +7,7 @@ import { AttitudeError } from '../errors.ts';
 import { LOCKED, NOT_REPRESENTABLE, REFUSED } from '../kernels/status.ts';
 import { pipelineBetween } from '../pipeline.ts';
 import { determinantOf, relabellingBetween } from '../relabelling.ts';
+import { refuseOutOfRange } from '../refuse-out-of-range.ts';
 import { WarningTally } from '../warning-tally.ts';
 import type { AttitudeWarning } from '../warnings.ts';
 import { fromMatrixRate, fromQuaternionRate, fromReference, toMatrixRate, toQuaternionRate, toReference, type BodyRates } from './body-rates.ts';
@@ -56,7 +57,7 @@ export function createRateConverter(attitude: Convention, from: Rate, to: Rate):
   function convert(attitudes: Float64Array, rates: Float64Array): ConvertedRates {
     const count = attitudes.length / width;
     if (rates.length !== count * inputWidth) throw new AttitudeError('count-mismatch', `${rates.length} numbers are not ${count} rates of ${inputWidth} numbers each.`);
-    refuseNonFinite(rates, inputWidth, converted);
+    refuseOutOfRange(rates, inputWidth, 'Rate', converted);
     const c = matrices.convert(attitudes);
     const out = new Float64Array(count * outputWidth);
     const conditions = new Float64Array(count).fill(1);
@@ -174,10 +175,4 @@ function relabelBack({ column, sign }: SignedPermutation, sense: number, omega: 
   const out: BodyRates = [0, 0, 0];
   for (let i = 0; i < 3; i++) out[column[i]!] = sense * sign[i]! * omega[i]!;
   return out;
-}
-
-function refuseNonFinite(rates: Float64Array, width: number, converted: number): void {
-  const bad = [...rates.keys()].filter((k) => !Number.isFinite(rates[k]));
-  if (bad.length === 0) return;
-  throw new AttitudeError('not-finite', `Rate ${converted + Math.floor(bad[0]! / width)} has a number that is not finite.`, bad.map((k) => ({ index: converted + Math.floor(k / width), component: k % width, message: `number ${k % width} of the rate is ${rates[k]}; every number must be finite` })));
 }

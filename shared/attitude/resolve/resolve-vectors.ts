@@ -2,6 +2,7 @@ import type { Convention, DcmConvention } from '../convention.ts';
 import { createConverter } from '../converter.ts';
 import { AttitudeError } from '../errors.ts';
 import { createRateConverter } from '../rates/rate-converter.ts';
+import { refuseOutOfRange } from '../refuse-out-of-range.ts';
 import type { Rate } from '../rates/rate.ts';
 
 export type Side = 'reference' | 'body';
@@ -33,7 +34,7 @@ export interface ResolvedVectors {
  * Accuracy: plain double precision on correctly rounded matrices: a few units in the last place of |v|, and of |ω| |v|.
  *
  * @param from - the side whose axes the vectors are given in; they come out in the other one's.
- * @throws AttitudeError `count-mismatch`, `not-finite`, and as createConverter and createRateConverter.
+ * @throws AttitudeError `count-mismatch`, `not-finite`, `out-of-range`, and as createConverter and createRateConverter.
  */
 export function resolveVectors(attitude: Convention, from: Side, { attitudes, vectors, change }: VectorsAt): ResolvedVectors {
   const components: DcmConvention = { representation: 'dcm', reference: attitude.reference, body: attitude.body, maps: 'reference-to-body', layout: 'row-major' };
@@ -41,7 +42,7 @@ export function resolveVectors(attitude: Convention, from: Side, { attitudes, ve
   const count = matrices.length / 9;
   for (const given of [vectors, ...(change ? [change.derivatives] : [])]) {
     if (given.length !== 3 * count) throw new AttitudeError('count-mismatch', `${given.length} numbers are not three for each of ${count} attitudes.`);
-    refuseNonFinite(given);
+    refuseOutOfRange(given, 3, 'Vector');
   }
   const omegas = change ? createRateConverter(attitude, change.rate, { rate: 'body', unit: 'rad/s' }).convert(attitudes, change.rates).rates : null;
   const resolved = new Float64Array(3 * count);
@@ -80,8 +81,3 @@ function toReference(c: Three, v: Three, out: Float64Array): void {
 }
 
 const cross = (a: Three, b: Three): [number, number, number] => [a[1]! * b[2]! - a[2]! * b[1]!, a[2]! * b[0]! - a[0]! * b[2]!, a[0]! * b[1]! - a[1]! * b[0]!];
-
-function refuseNonFinite(numbers: Float64Array): void {
-  const bad = numbers.findIndex((number) => !Number.isFinite(number));
-  if (bad >= 0) throw new AttitudeError('not-finite', `Vector ${Math.floor(bad / 3)} has a component that is not finite.`, [{ index: Math.floor(bad / 3), component: bad % 3, message: `is ${numbers[bad]}; it must be a finite number` }]);
-}

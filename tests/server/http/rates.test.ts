@@ -46,6 +46,7 @@ describe('POST /rates', () => {
     ['a sample that is none', { attitude: DEG, from: BODY, to: EULER, samples: [{ attitude: [1, 0, 0] }] }, 'invalid-field', '/samples/0'],
     ['a rate with a number too few', { attitude: DEG, from: BODY, to: EULER, samples: [{ attitude: [1, 0, 0], rate: [1, 2] }] }, 'count-mismatch', '/samples/0/rate'],
     ['a number that is none', { attitude: DEG, from: BODY, to: EULER, samples: [{ attitude: [1, 0, 0], rate: [1, null, 2] }] }, 'not-finite', '/samples/0/rate/1'],
+    ['a rate too large to compute with', { attitude: DEG, from: BODY, to: EULER, samples: [{ attitude: [1, 0, 0], rate: [1, 1e101, 2] }] }, 'out-of-range', '/samples/0/rate/1'],
     ['no rotation', { attitude: { preset: 'aircraft-quaternion' }, from: BODY, to: BODY, samples: [{ attitude: [2, 0, 0, 0], rate: [1, 2, 3] }] }, 'not-a-rotation', '/samples/0'],
   ])('refuses %s', async (_what, sent, code, pointer) => {
     const { status, body } = await rates(sent);

@@ -138,6 +138,7 @@ describe('POST /verify-rates', () => {
   it.each<[string, object, string, string]>([
     ['too few rates', { actual: { rate: { rate: 'body', unit: 'deg/s' }, rates: [[1, 2, 3]] } }, 'count-mismatch', '/actual/rates'],
     ['a rate of two numbers', { actual: { rate: { rate: 'body', unit: 'deg/s' }, rates: [[1, 2, 3], [1, 2]] } }, 'count-mismatch', '/actual/rates/1'],
+    ['a rate too large to compute with', { actual: { rate: { rate: 'body', unit: 'rad/s' }, rates: [[1, 2, 3], [1e308, 0, 0]] } }, 'out-of-range', '/actual/rates/1/0'],
     ['a tolerance in degrees', { tolerance: { rate: 1, unit: 'deg' } }, 'invalid-field', '/tolerance/unit'],
     ['a derivative that the attitude does not have', { actual: { rate: { rate: 'dcm' }, rates: [[1], [2]] } }, 'invalid-facet', '/actual/rate/rate'],
   ])('refuses %s', async (_what, change, code, pointer) => {

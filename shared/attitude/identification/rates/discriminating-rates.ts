@@ -3,8 +3,9 @@ import { createConverter } from '../../converter.ts';
 import { readingOf } from '../../reading.ts';
 import { benchAngles } from '../explain/discriminating.ts';
 import { frameRotation, multiply } from '../fit/small-matrix.ts';
+import type { DiscriminatingAttitude } from '../identification.ts';
 import { expectedNumbers, type RateHypothesis } from './hypotheses.ts';
-import type { DiscriminatingRate } from './rate-identification.ts';
+
 
 const DEG = Math.PI / 180;
 /** Heading, pitch and bank, degrees, of a turntable with a tilting bed; plain ones first. */
@@ -15,7 +16,7 @@ const RATE = 10 * DEG;
 const PROPOSED = 3;
 
 /** Up to three attitudes to hold, each with a body axis to turn about, that split what remains best. */
-export function discriminatingRates(hypotheses: readonly RateHypothesis[], reference: Convention, standard: DcmConvention, sigma: number): DiscriminatingRate[] {
+export function discriminatingRates(hypotheses: readonly RateHypothesis[], reference: Convention, standard: DcmConvention, sigma: number): DiscriminatingAttitude[] {
   const fromAngles = createConverter(benchAngles(standard.reference), reference, { warnWithinDeg: 0 });
   const tolerance = Math.max(6 * sigma, 0.02 * RATE);
   const candidates = BENCH.flatMap((angles) => AXES.map((_, axis) => {
@@ -24,7 +25,7 @@ export function discriminatingRates(hypotheses: readonly RateHypothesis[], refer
     return { angles, axis, predicted: hypotheses.map((hypothesis) => expectedNumbers(hypothesis, { c, omega })) };
   }));
   let parts: readonly number[][] = [hypotheses.map((_, k) => k)];
-  const proposed: DiscriminatingRate[] = [];
+  const proposed: DiscriminatingAttitude[] = [];
   while (proposed.length < PROPOSED) {
     const split = candidates.map(({ predicted }) => parts.flatMap((part) => grouped(part, predicted, hypotheses, tolerance)));
     const best = split.reduce((least, each, k) => (pairs(each) < pairs(split[least]!) ? k : least), 0);

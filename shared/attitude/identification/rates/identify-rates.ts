@@ -3,6 +3,7 @@ import type { AngleUnit, Convention, DcmConvention } from '../../convention.ts';
 import { createConverter } from '../../converter.ts';
 import { AttitudeError } from '../../errors.ts';
 import { type RateUnit } from '../../rates/rate.ts';
+import { refuseOutOfRange } from '../../refuse-out-of-range.ts';
 import { discriminatingRates } from './discriminating-rates.ts';
 import { errorAt } from './error-at.ts';
 import type { RateHypothesis } from './hypotheses.ts';
@@ -40,7 +41,7 @@ export interface RateClass {
  *
  * Offsets, lags and scales of rates are not looked for.
  *
- * @throws AttitudeError `count-mismatch`, `not-finite`, and as createConverter does for the reference.
+ * @throws AttitudeError `count-mismatch`, `not-finite`, `out-of-range`, and as createConverter does for the reference.
  */
 export function identifyRates({ reference, times, observed, noise }: RateIdentificationInput): RateIdentification {
   const { convention } = reference;
@@ -70,8 +71,7 @@ export function identifyRates({ reference, times, observed, noise }: RateIdentif
 function numbersOf(numbers: Float64Array, count: number): { readonly width: 3 | 4 | 9; readonly numbers: Float64Array } {
   const width = numbers.length / count;
   if (count === 0 || (width !== 3 && width !== 4 && width !== 9)) throw new AttitudeError('count-mismatch', `${numbers.length} numbers are not 3, 4 or 9 for each of ${count} attitudes.`);
-  const bad = numbers.findIndex((number) => !Number.isFinite(number));
-  if (bad >= 0) throw new AttitudeError('not-finite', `Observed rate ${Math.floor(bad / width)} has a number that is not finite.`, [{ index: Math.floor(bad / width), component: bad % width, message: `is ${numbers[bad]}; it must be a finite number` }]);
+  refuseOutOfRange(numbers, width, 'Observed rate');
   return { width, numbers };
 }
 

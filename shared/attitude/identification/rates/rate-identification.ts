@@ -1,5 +1,6 @@
 import type { Convention } from '../../convention.ts';
 import type { Rate, RateUnit } from '../../rates/rate.ts';
+import type { DiscriminatingAttitude } from '../identification.ts';
 
 /** Rates that are stated this way are these numbers, at every attitude. */
 export interface RateStatement {
@@ -16,23 +17,12 @@ export interface RateExplanation extends RateStatement {
   readonly sameNumbersAs: readonly RateStatement[];
 }
 
-/** A test that would tell remaining explanations apart: an attitude to hold while turning about one body axis. */
-export interface DiscriminatingRate {
-  /** In the reference's convention. */
-  readonly attitude: readonly number[];
-  readonly reading: string;
-  readonly separates: {
-    readonly answers: number;
-    readonly explanations: number;
-    readonly predictions: readonly { readonly numbers: readonly number[]; readonly explanations: readonly number[] }[];
-  };
-}
-
 export interface RateIdentification {
   readonly outcome: 'unique' | 'ambiguous' | 'none';
   /** Fewest edits first; at most 100. */
   readonly explanations: readonly RateExplanation[];
   readonly remaining: number;
   readonly unobservable: readonly string[];
-  readonly discriminating: readonly DiscriminatingRate[];
+  /** At most three; each reading also names the body axis to turn about. */
+  readonly discriminating: readonly DiscriminatingAttitude[];
 }

@@ -8,8 +8,8 @@ import { useIdentify } from '../../features/identify/api/identify.ts';
 import { IdentificationReport } from '../../features/identify/components/identification-report.tsx';
 import { timesIn, timesOf } from '../../features/identify/model/times.ts';
 import { RecordingEditor } from '../../features/verify/components/recording-editor.tsx';
-import { parseTable } from '../../features/verify/model/parse-table.ts';
-import { emptyRecording, readRecording, type Recording } from '../../features/verify/model/recording.ts';
+import { emptyRecording } from '../../features/verify/model/recording.ts';
+import { useReadRecording } from '../../features/verify/model/use-read-recording.ts';
 import { ConventionEditor } from '../../features/workbench/components/convention-editor.tsx';
 import { statementOf } from '../../features/workbench/model/workbench-state.ts';
 
@@ -21,8 +21,8 @@ export function Component() {
   const [believed, setBelieved] = useState(true);
   const [timeColumn, setTimeColumn] = useState<string | null>(null);
   const [noise, setNoise] = useState({ angle: '0.05', unit: 'deg' as 'deg' | 'rad' });
-  const left = useRead(reference);
-  const right = useRead(observed);
+  const left = useReadRecording(reference);
+  const right = useReadRecording(observed);
   const column = timeColumn ?? timesIn(left.table, left.columns);
   const times = useMemo(() => timesOf(left.table, column), [left.table, column]);
   const sigma = Number(noise.angle);
@@ -78,10 +78,4 @@ export function Component() {
       )}
     </>
   );
-}
-
-/** Reads the text once, however often the convention or the columns change. */
-function useRead(recording: Recording) {
-  const table = useMemo(() => parseTable(recording.text), [recording.text]);
-  return useMemo(() => readRecording(recording, table), [recording, table]);
 }

@@ -1,4 +1,4 @@
-import { useMemo, useState } from 'react';
+import { useState } from 'react';
 import { useLocation, useNavigate } from 'react-router-dom';
 import { Button } from '../../components/button.tsx';
 import { SelectField, TextField } from '../../components/field.tsx';
@@ -6,8 +6,8 @@ import { Notice, ProblemNotice } from '../../components/notice.tsx';
 import { PageHeading } from '../../components/page-heading.tsx';
 import { useVerify, type Tolerance } from '../../features/runs/api/runs.ts';
 import { RecordingEditor } from '../../features/verify/components/recording-editor.tsx';
-import { parseTable } from '../../features/verify/model/parse-table.ts';
-import { emptyRecording, readRecording, type Recording } from '../../features/verify/model/recording.ts';
+import { emptyRecording, type Recording } from '../../features/verify/model/recording.ts';
+import { useReadRecording } from '../../features/verify/model/use-read-recording.ts';
 import { ConventionEditor } from '../../features/workbench/components/convention-editor.tsx';
 import { statementOf } from '../../features/workbench/model/workbench-state.ts';
 
@@ -22,8 +22,8 @@ export function Component() {
   const [repair, setRepair] = useState(false);
   const [tolerance, setTolerance] = useState({ angle: '0.1', unit: 'deg' as Tolerance['unit'] });
   const [label, setLabel] = useState('');
-  const left = useRead(expected);
-  const right = useRead(actual);
+  const left = useReadRecording(expected);
+  const right = useReadRecording(actual);
   const within = Number(tolerance.angle);
   const obstacle = left.error || right.error ? 'Mend what is marked first.'
     : left.attitudes.length === 0 || right.attitudes.length === 0 ? 'Give both the expected and the actual attitudes.'
@@ -64,10 +64,4 @@ export function Component() {
       </form>
     </>
   );
-}
-
-/** Reads the text once, however often the convention or the columns change. */
-function useRead(recording: Recording) {
-  const table = useMemo(() => parseTable(recording.text), [recording.text]);
-  return useMemo(() => readRecording(recording, table), [recording, table]);
 }
